@@ -1,4 +1,4 @@
-import { dimensionOf, UNITS, type Dimension, type Unit } from './unit';
+import { dimensionOf, UNITS, type Dimension, type Unit } from './units';
 
 /** Units that share a dimension with `U`; the compiler refuses psi for inches. */
 export type UnitLike<U extends Unit> = {

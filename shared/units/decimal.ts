@@ -33,10 +33,10 @@ export const writeDecimal = ({ negative, digits, scale }: Digits): string => {
 
 /**
  * The canonical decimal string of a number: plain digits, trimmed, rounded half away from zero to `places` (six by
- * default). Null for NaN and the infinities, which no event may carry.
+ * default). NaN and the infinities give `NaN`, which is no decimal string and which every contract refuses.
  */
-export const toDecimal = (value: number, places = 6): string | null =>
-  Number.isFinite(value) ? writeDecimal(roundHalfAway(spell(value), places)) : null;
+export const toDecimal = (value: number, places = 6): string =>
+  Number.isFinite(value) ? writeDecimal(roundHalfAway(spell(value), places)) : 'NaN';
 
 const CANONICAL = /^-?(0|[1-9]\d*)(\.\d*[1-9])?$/;
 
@@ -47,4 +47,4 @@ export const isDecimal = (text: string): boolean => CANONICAL.test(text) && text
 export const fromDecimal = (text: string): number | null => (isDecimal(text) ? Number(text) : null);
 
 /** A number rounded half away from zero to `places`, judged by how it reads in decimals. NaN stays NaN. */
-export const roundTo = (value: number, places: number): number => Number(toDecimal(value, places) ?? value);
+export const roundTo = (value: number, places: number): number => Number(toDecimal(value, places));

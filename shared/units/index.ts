@@ -1,5 +1,5 @@
 export * from './quantity';
-export * from './unit';
+export * from './units';
 export * from './convert';
 export * from './decimal';
 export * from './print-decimal';

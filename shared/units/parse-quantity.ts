@@ -1,6 +1,6 @@
 import { writeDecimal } from './decimal';
 import { plainText } from './tape-text';
-import { dimensionOf, type Unit } from './unit';
+import { dimensionOf, type Unit } from './units';
 import { unitNamed } from './unit-words';
 
 /** Why a typed quantity was refused; each has its own message saying what to type instead. */

@@ -4,7 +4,8 @@ import { toDecimal } from './decimal';
 export const NO_NUMBER = '–';
 
 /** A number for reading, without float noise: 0.1 + 0.2 prints as `0.3`. Rounds half away from zero. */
-export const printDecimal = (value: number, places = 3): string => toDecimal(value, places) ?? NO_NUMBER;
+export const printDecimal = (value: number, places = 3): string =>
+  Number.isFinite(value) ? toDecimal(value, places) : NO_NUMBER;
 
 /** The same with a fixed number of decimals, so that a column lines up: `2.50`. */
 export const printFixed = (value: number, places: number): string => {

@@ -1,4 +1,4 @@
-import type { Unit } from './unit';
+import type { Unit } from './units';
 
 /** Every way a unit may be written behind a number, in lower case. */
 const WORDS: Readonly<Record<string, Unit>> = {
