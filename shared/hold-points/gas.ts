@@ -1,0 +1,126 @@
+import { clockIsDoubtful, minutesBetween } from '../job/actor';
+import type { PointContext } from './context';
+import type { GroupDefinition } from './definition';
+import { check, instrument, quantity, time, words } from './fields';
+import { bySetting, commonPractice, judgeCheck, judgeFact, judgeRange, standard } from './judging';
+import type { Verdict } from './verdict';
+
+/** Where the air is sampled. */
+export const gasPlaces = ['cellar', 'bore', 'annulus'] as const;
+const gases = [
+  { key: 'oxygen', unit: '%', likely: { min: 15, max: 25 } },
+  { key: 'flammable', unit: '%', likely: { min: 0, max: 20 } },
+  { key: 'h2s', unit: 'ppm', likely: { min: 0, max: 50 } },
+  { key: 'co', unit: 'ppm', likely: { min: 0, max: 100 } },
+] as const;
+
+const readingKeys = gasPlaces.flatMap((place) => gases.map((gas) => `gas.${place}.${gas.key}`));
+
+/** The gas check: of the site, read again whenever it has grown old. */
+export const gasGroups = (): GroupDefinition[] => [
+  ...gasPlaces.map((place) => ({
+    key: `gas-${place}`,
+    fields: gases.map((gas) => quantity(`gas.${place}.${gas.key}`, gas.unit, { site: true, likely: gas.likely })),
+  })),
+  {
+    key: 'gas-meter',
+    fields: [
+      instrument('gas.meter', ['gas-meter'], { site: true }),
+      check('gas.bump-tested', { site: true }),
+      check('gas.monitor', { site: true }),
+    ],
+  },
+];
+
+/** The hot work permit: of the site, since it may be renewed while the job runs. */
+export const permitGroup = (): GroupDefinition => ({
+  key: 'permit',
+  fields: [
+    words('permit.number', { site: true }),
+    words('permit.issuer', { site: true }),
+    time('permit.expires', { site: true }),
+  ],
+});
+
+/** Every gas reading against its limit. A gas limit is a stop: nobody can concede it. */
+export const judgeGas = (context: PointContext): Verdict[] =>
+  gasPlaces.flatMap((place) => {
+    const at = (gas: string) => `gas.${place}.${gas}`;
+    const held = (gas: string) => ({
+      limit: at(gas),
+      kind: 'stop' as const,
+      about: [at(gas)],
+      measured: context.number(at(gas)),
+      says: `gas-${gas}`,
+    });
+    return [
+      ...judgeRange(context, { ...held('oxygen'), unit: '%', min: 19.5, max: 23.5, source: standard('29 CFR 1910.146(b)') }),
+      ...judgeRange(context, {
+        ...held('flammable'),
+        unit: '%',
+        max: Math.min(context.setting('lelMaxPct'), 9.9),
+        source: bySetting(context, 'lelMaxPct'),
+      }),
+      ...judgeRange(context, { ...held('h2s'), unit: 'ppm', max: 10, exclusiveMax: true, source: standard('NIOSH ceiling for H2S') }),
+      ...judgeRange(context, { ...held('co'), unit: 'ppm', max: 35, exclusiveMax: true, source: standard('NIOSH REL for CO') }),
+    ];
+  });
+
+/** The meter bump-tested today, a continuous monitor in place, and no doubt about when the air was read. */
+export const judgeGasMeter = (context: PointContext): Verdict[] => {
+  const read = readingKeys.flatMap((key) => context.read(key) ?? []);
+  return [
+    ...judgeCheck(context, 'gas.bump-tested', 'stop'),
+    ...judgeCheck(context, 'gas.monitor', 'stop'),
+    ...judgeFact(context, {
+      limit: 'gas-clock',
+      kind: 'stop',
+      about: readingKeys.filter((key) => context.read(key)),
+      source: commonPractice,
+      holds: read.length === 0 ? undefined : !read.some((reading) => clockIsDoubtful(reading.at)),
+    }),
+  ];
+};
+
+/** When the oldest reading of the last gas check was taken, corrected; undefined while one is missing. */
+export const oldestGasReading = (context: PointContext): string | undefined => {
+  const times = readingKeys.map((key) => context.read(key)?.at.corrected);
+  if (times.some((one) => one === undefined)) return undefined;
+  return (times as string[]).sort()[0];
+};
+
+/** Minutes that the gas check still stands at `at`; negative when it has run out, undefined without one. */
+export const gasMinutesLeft = (context: PointContext, at: string): number | undefined => {
+  const oldest = oldestGasReading(context);
+  return oldest === undefined ? undefined : context.setting('gasFreshMin') - minutesBetween(oldest, at);
+};
+
+/** Before fire is lit: the air read within the time that the job allows, every reading within, the permit in force. */
+export const judgeFlame = (context: PointContext, at: string): Verdict[] => {
+  const oldest = oldestGasReading(context);
+  const expires = context.value('permit.expires');
+  const air = judgeGas(context);
+  return [
+    ...(oldest === undefined
+      ? judgeFact(context, { limit: 'gas-fresh', kind: 'stop', about: readingKeys, source: bySetting(context, 'gasFreshMin'), says: 'gas-missing', holds: false })
+      : judgeRange(context, {
+          limit: 'gas-fresh',
+          kind: 'stop',
+          about: readingKeys,
+          measured: minutesBetween(oldest, at),
+          max: context.setting('gasFreshMin'),
+          unit: 'min',
+          source: bySetting(context, 'gasFreshMin'),
+        })),
+    ...air.filter((verdict) => verdict.outcome === 'outside'),
+    ...judgeGasMeter(context).filter((verdict) => verdict.outcome === 'outside'),
+    ...judgeFact(context, {
+      limit: 'permit-in-force',
+      kind: 'stop',
+      about: ['permit.expires'],
+      source: commonPractice,
+      params: expires === undefined ? { expires: '' } : { expires: { instant: expires } },
+      holds: expires !== undefined && Date.parse(expires) > Date.parse(at),
+    }),
+  ];
+};

@@ -1,0 +1,27 @@
+/** What may stand in a message: plain words and numbers, or a value that is printed the reader's way. */
+export type TextParam = string | number | QuantityParam | InstantParam | Text;
+
+/** A measured value as the record keeps it: a decimal string and the code of its unit. */
+export interface QuantityParam {
+  readonly quantity: string;
+  readonly unit: string;
+}
+
+/** A moment, ISO 8601. */
+export interface InstantParam {
+  readonly instant: string;
+}
+
+/**
+ * A sentence before it is said in a language: a message key and what goes into it.
+ * Rules, the server and the record speak in these; only the last step turns one into words.
+ */
+export interface Text {
+  readonly key: string;
+  readonly params?: Readonly<Record<string, TextParam>>;
+}
+
+/** Builds a {@link Text}; shorter to write where many are listed. */
+export function text(key: string, params?: Readonly<Record<string, TextParam>>): Text {
+  return params === undefined ? { key } : { key, params };
+}
