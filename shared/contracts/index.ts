@@ -1,0 +1,15 @@
+import { accountRoutes } from './account';
+import { catalogueRoutes } from './catalogue';
+import { clockRoutes } from './clock';
+import type { RouteContract } from './contract';
+import { healthRoutes } from './health';
+import { sessionRoutes } from './session';
+
+/** Every route there is: the document of the API and the role table are made from this list. One line for each resource. */
+export const allRoutes: readonly RouteContract[] = [
+  ...accountRoutes,
+  ...catalogueRoutes,
+  ...clockRoutes,
+  ...healthRoutes,
+  ...sessionRoutes,
+];
