@@ -8,7 +8,8 @@ export default {
       truncated: 'The photo is cut off or damaged. Take it again.',
       'no-size': 'The photo has no width or no height. Take it again.',
       'too-many-pixels': 'The photo has more than 60 megapixels. Set the camera to a smaller size and take it again.',
-      polyglot: 'The file carries something else beside the photo, so it is not taken. Send the photo as the camera made it.',
+      polyglot:
+        'The file carries something else beside the photo, so it is not taken. Send the photo as the camera made it.',
     },
     recorder: {
       empty: 'The recorder file is empty. Export it again.',
