@@ -1,6 +1,7 @@
-/** Why a photo is not taken. Each has its sentence in the locale file of the same name (`photos.refusal`). */
+/** Why a photo is not taken. Each has its sentence in the locale file `file-refusals`, area `errors`. */
 export const PHOTO_REFUSALS = [
   'photo.empty',
+  'photo.unreadable',
   'photo.too-large',
   'photo.not-an-image',
   'photo.truncated',
@@ -25,7 +26,7 @@ export type TransferRefusal = (typeof TRANSFER_REFUSALS)[number];
 
 export type FileRefusal = PhotoRefusal | RecorderRefusal | TransferRefusal;
 
-/** The message key of a refusal: `photo.too-large` → `photos.refusal.photo.too-large`. */
+/** The message key of a refusal: `photo.too-large` → `errors.photo.too-large`. */
 export function refusalMessageKey(code: FileRefusal): string {
-  return `photos.refusal.${code}`;
+  return `errors.${code}`;
 }

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { afterEach, beforeEach, describe, expect, test } from 'vitest';
 import { storeFile, type FileFacts, type FileToStore } from '../../../server/services/store-file';
-import en from '../../../shared/locales/en/photos';
+import en from '../../../shared/locales/en/file-refusals';
 import { hasWords } from '../../../shared/locales/say';
 import { refusalMessageKey } from '../../../shared/photos/refusals';
 import { aStorage, type StorageForTest } from '../../support/a-storage';
@@ -59,7 +59,7 @@ describe('a photo', () => {
     expect(await send(bytes)).toEqual({ ok: false, code });
     expect(await house.files()).toEqual([]);
     expect(registered).toEqual([]);
-    expect(hasWords({ photos: en }, refusalMessageKey(code))).toBe(true);
+    expect(hasWords({ errors: en }, refusalMessageKey(code))).toBe(true);
   });
 
   test('under a foreign hash is refused and leaves nothing behind', async () => {
