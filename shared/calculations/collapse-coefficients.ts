@@ -9,7 +9,7 @@ export const collapseCoefficientsInfo = {
   range: 'yield strength 20,000 to 200,000 psi',
 } as const;
 
-/** 46.95 million psi: the elastic constant 2E/(1 − ν²) with the bulletin's 0.7125 reduction. */
+/** The elastic formula's constant as published, psi; customary units only. */
 export const ELASTIC_PSI = 46.95e6;
 
 export interface CollapseCoefficients {

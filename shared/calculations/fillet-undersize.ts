@@ -1,0 +1,37 @@
+import { firstRefusal, mustBe, type Outcome } from './outcome';
+
+export const filletUndersizeInfo = {
+  id: 'fillet-undersize',
+  version: 1,
+  formula: 'leg ≤ 3/16 in: 1/16 in; up to 1/4 in: 3/32 in; from 5/16 in: 1/8 in; on at most 10 % of the length',
+  source: 'AWS D1.1 visual acceptance (from memory)',
+  range: 'leg above 0 to 3 in',
+} as const;
+
+/** How much a fillet may run under its size by that size, inches, on at most a tenth of its length. From memory. */
+export const UNDERSIZE_ALLOWANCES = [
+  { upToLegIn: 3 / 16, underIn: 1 / 16 },
+  { upToLegIn: 1 / 4, underIn: 3 / 32 },
+  { upToLegIn: Infinity, underIn: 1 / 8 },
+] as const;
+export const UNDERSIZE_LENGTH_SHARE_PCT = 10;
+
+/** Whether a measured fillet leg is full, tolerable as a short undersize, or too small, in inches. */
+export const filletUndersize = (weld: {
+  planLegIn: number;
+  measuredLegIn: number;
+  undersizeSharePct: number;
+}): Outcome<{ allowedUnderIn: number; shortIn: number; verdict: 'full' | 'tolerable' | 'too-small' }> => {
+  const { planLegIn, measuredLegIn, undersizeSharePct } = weld;
+  const refused = firstRefusal(
+    mustBe('planLegIn', planLegIn, { above: 0, atMost: 3 }),
+    mustBe('measuredLegIn', measuredLegIn, { atLeast: 0, atMost: 6 }),
+    mustBe('undersizeSharePct', undersizeSharePct, { atLeast: 0, atMost: 100 }),
+  );
+  if (refused) return refused;
+  const allowedUnderIn = UNDERSIZE_ALLOWANCES.find((row) => planLegIn <= row.upToLegIn)?.underIn ?? 0;
+  const shortIn = Math.max(0, planLegIn - measuredLegIn);
+  if (shortIn === 0) return { ok: true, allowedUnderIn, shortIn, verdict: 'full' };
+  const tolerable = shortIn <= allowedUnderIn && undersizeSharePct <= UNDERSIZE_LENGTH_SHARE_PCT;
+  return { ok: true, allowedUnderIn, shortIn, verdict: tolerable ? 'tolerable' : 'too-small' };
+};
