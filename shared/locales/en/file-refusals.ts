@@ -20,5 +20,6 @@ export default {
   file: {
     'hash-mismatch': 'The file changed on its way. It is sent again from this device.',
     incomplete: 'The file did not arrive whole. It is sent again from this device.',
+    'too-often': 'Too many files at once. They are sent again in {seconds} seconds.',
   },
 } as const;
