@@ -36,7 +36,11 @@ const passOf = (state: JobState, point: PointState): ProcedurePass | null => {
 
 /** The view of one point for its definition. */
 export const contextOf = (state: JobState, point: PointState): PointContext => {
-  const read = (field: string): Reading | undefined => newest(point.readings[field]) ?? newest(state.site[field]);
+  // what was released keeps the air and the permit that it was released on, however often they are read again
+  const released = point.release ? new Set(point.release.readings) : null;
+  const ofSite = (field: string): Reading[] | undefined =>
+    released ? state.site[field]?.filter((one) => released.has(one.id)) : state.site[field];
+  const read = (field: string): Reading | undefined => newest(point.readings[field]) ?? newest(ofSite(field));
   const value = (field: string): string | undefined => read(field)?.value;
   return {
     state,

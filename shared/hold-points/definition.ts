@@ -1,4 +1,5 @@
 import type { InstrumentKind } from '../job/plan';
+import type { Unit } from '../units/units';
 import type { PointContext } from './context';
 import type { PointKind } from './points';
 import type { Computed, Verdict } from './verdict';
@@ -6,7 +7,7 @@ import type { Computed, Verdict } from './verdict';
 /** What a person is asked for, and how what he types is read. */
 export type FieldType =
   /** a number with a unit; kept as a decimal string in the field's own unit */
-  | { type: 'quantity'; unit: string; difference?: true }
+  | { type: 'quantity'; unit: Unit; difference?: true }
   /** a whole number without a unit */
   | { type: 'count' }
   /** done or not done */

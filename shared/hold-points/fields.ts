@@ -1,4 +1,5 @@
 import type { InstrumentKind } from '../job/plan';
+import type { Unit } from '../units/units';
 import type { FieldDefinition } from './definition';
 
 /** Short makers for field definitions, so that a point's file reads like the trade's own check sheet. */
@@ -11,7 +12,7 @@ const make = (key: string, of: FieldDefinition['of'], extra: Extra = {}): FieldD
   ...extra,
 });
 
-export const quantity = (key: string, unit: string, extra?: Extra): FieldDefinition =>
+export const quantity = (key: string, unit: Unit, extra?: Extra): FieldDefinition =>
   make(key, { type: 'quantity', unit }, extra);
 export const count = (key: string, extra?: Extra): FieldDefinition => make(key, { type: 'count' }, extra);
 export const check = (key: string, extra?: Extra): FieldDefinition => make(key, { type: 'check' }, extra);
@@ -26,5 +27,5 @@ export const welders = (key: string, extra?: Extra): FieldDefinition => make(key
 
 /** The clock positions of a quadrant reading; 12 o'clock faces the V-door, clockwise seen from above. */
 export const quarters = ['12', '3', '6', '9'] as const;
-export const byQuarter = (base: string, unit: string, extra?: Extra): FieldDefinition[] =>
+export const byQuarter = (base: string, unit: Unit, extra?: Extra): FieldDefinition[] =>
   quarters.map((quarter) => quantity(`${base}.${quarter}`, unit, extra));

@@ -8,8 +8,8 @@ import type { Verdict } from './verdict';
 /** Where the air is sampled. */
 export const gasPlaces = ['cellar', 'bore', 'annulus'] as const;
 const gases = [
-  { key: 'oxygen', unit: '%', likely: { min: 15, max: 25 } },
-  { key: 'flammable', unit: '%', likely: { min: 0, max: 20 } },
+  { key: 'oxygen', unit: 'pct', likely: { min: 15, max: 25 } },
+  { key: 'flammable', unit: 'pct', likely: { min: 0, max: 20 } },
   { key: 'h2s', unit: 'ppm', likely: { min: 0, max: 50 } },
   { key: 'co', unit: 'ppm', likely: { min: 0, max: 100 } },
 ] as const;
@@ -54,10 +54,10 @@ export const judgeGas = (context: PointContext): Verdict[] =>
       says: `gas-${gas}`,
     });
     return [
-      ...judgeRange(context, { ...held('oxygen'), unit: '%', min: 19.5, max: 23.5, source: standard('29 CFR 1910.146(b)') }),
+      ...judgeRange(context, { ...held('oxygen'), unit: 'pct', min: 19.5, max: 23.5, source: standard('29 CFR 1910.146(b)') }),
       ...judgeRange(context, {
         ...held('flammable'),
-        unit: '%',
+        unit: 'pct',
         max: Math.min(context.setting('lelMaxPct'), 9.9),
         source: bySetting(context, 'lelMaxPct'),
       }),

@@ -1,4 +1,5 @@
 import type { Text, TextParam } from '../locales/text';
+import type { Unit } from '../units/units';
 import { toDecimal } from '../units/decimal';
 import type { SettingName } from '../job/plan';
 import type { PointContext } from './context';
@@ -49,7 +50,7 @@ export const judgeRange = (
   context: PointContext,
   frame: LimitFrame & {
     measured: number | undefined;
-    unit: string;
+    unit: Unit;
     min?: number;
     max?: number;
     exclusiveMax?: boolean;

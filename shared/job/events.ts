@@ -23,6 +23,8 @@ export interface RecordedEntry {
   unit: string | null;
   /** as understood: decimal in the field's own unit, `yes`/`no`, a choice's code, an ISO instant, or the text */
   value: string;
+  /** belongs to the site and not to the point that it was typed at */
+  site: boolean;
   measuredBy: PersonRef;
 }
 
@@ -51,7 +53,7 @@ interface EventBodies {
   'act-begun': { point: PointId; act: string; verdicts: Verdict[] };
   'act-ended': { point: PointId; act: string };
   'point-presented': { point: PointId; contentHash: string; judged: AsJudged };
-  'presentation-withdrawn': { point: PointId; reason: string | null; cause: 'recorder' | 'late-evidence' | 'stop-work' };
+  'presentation-withdrawn': { point: PointId; reason: string | null; cause: 'recorder' | 'late-evidence' };
   'point-released': {
     point: PointId;
     readings: string[];

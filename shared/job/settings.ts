@@ -15,7 +15,7 @@ interface SettingDefinition {
  */
 export const settingDefinitions: Record<SettingName, SettingDefinition> = {
   gasFreshMin: { unit: 'min', value: '60', min: '5', max: '240' },
-  lelMaxPct: { unit: '%', value: '0', min: '0', max: '9.9' },
+  lelMaxPct: { unit: 'pct', value: '0', min: '0', max: '9.9' },
   tapesAgreeIn: { unit: 'in', value: '0.0625', min: '0.015625', max: '0.5' },
   markAgreesIn: { unit: 'in', value: '0.0625', min: '0.015625', max: '0.5' },
   stubAboveMarkIn: { unit: 'in', value: '3', min: '0.5', max: '24' },
@@ -28,10 +28,10 @@ export const settingDefinitions: Record<SettingName, SettingDefinition> = {
   tiltDeg: { unit: 'deg', value: '0.25', min: '0.05', max: '2' },
   datumWithinIn: { unit: 'in', value: '0.25', min: '0.03125', max: '6' },
   passTemperatureMin: { unit: 'min', value: '5', min: '1', max: '30' },
-  touchF: { unit: '°F', value: '120', min: '60', max: '150' },
-  collapseSharePct: { unit: '%', value: '80', min: '10', max: '100' },
-  gaugeLowPct: { unit: '%', value: '25', min: '0', max: '50' },
-  gaugeHighPct: { unit: '%', value: '75', min: '50', max: '100' },
+  touchF: { unit: 'degF', value: '120', min: '60', max: '150' },
+  collapseSharePct: { unit: 'pct', value: '80', min: '10', max: '100' },
+  gaugeLowPct: { unit: 'pct', value: '25', min: '0', max: '50' },
+  gaugeHighPct: { unit: 'pct', value: '75', min: '50', max: '100' },
 };
 
 /** The settings of a job whose operator's programme says nothing. */

@@ -1,0 +1,173 @@
+import { fieldOf, reviewPoint, standingPhotos } from './review';
+import { contextOf } from '../hold-points/context';
+import { judgeFlame } from '../hold-points/gas';
+import { siteGroups, sitePoint } from '../hold-points/site';
+import { definitionOf } from '../hold-points/definitions';
+import type { FieldDefinition } from '../hold-points/definition';
+import type { RecordEntry } from '../contracts/commands';
+import { samePerson, type PersonRef } from './actor';
+import { accept, event, pointNamed, refuse, type Decider, type Decision, type Deciding } from './decision';
+import type { RecordedEntry } from './events';
+import { currentPoint } from './points';
+import type { JobState, PointState } from './state';
+import { understand } from './understand';
+
+/** Where evidence that arrives now stands: it counts, it withdraws a presentation, or it came too late. */
+type Standing = { late: boolean; withdraws: boolean } | Decision;
+
+const isDecision = (standing: Standing): standing is Decision => 'ok' in standing;
+
+/** A reading captured before presenting that arrives later is kept: it withdraws, or stands flagged as late. */
+const standingOf = (point: PointState, correctedAt: string): Standing => {
+  const before = (time: string | undefined): boolean => time !== undefined && Date.parse(correctedAt) < Date.parse(time);
+  switch (point.status) {
+    case 'open':
+      return { late: false, withdraws: false };
+    case 'shut':
+      return refuse('point-shut');
+    case 'presented':
+      return before(point.presentation?.at.corrected)
+        ? { late: false, withdraws: true }
+        : refuse('point-presented', { since: point.presentation });
+    case 'released':
+      return before(point.presentation?.at.corrected)
+        ? { late: true, withdraws: false }
+        : refuse('point-already-released', { since: point.release });
+  }
+};
+
+const withdrawal = (input: Deciding<'record'> | Deciding<'add-photo'>, point: string) =>
+  event(input, 'presentation-withdrawn', { point, reason: null, cause: 'late-evidence' });
+
+interface Read {
+  entry: RecordEntry;
+  field: FieldDefinition;
+  value: string;
+  measuredBy: PersonRef;
+}
+
+/** Understands every entry or says at the first that is not, which one and why. */
+const readEntries = (entries: RecordEntry[], find: (key: string) => FieldDefinition | undefined, self: PersonRef): Read[] | Decision => {
+  const read: Read[] = [];
+  for (const entry of entries) {
+    const field = find(entry.field);
+    if (!field) return refuse('no-such-field', { params: { field: entry.field } });
+    const understood = understand(field, entry.typed, entry.unit);
+    if (!understood.ok)
+      return refuse('not-understood', {
+        params: { typed: entry.typed, why: { key: `entry.${understood.reason}` } },
+        missing: [`field:${entry.field}`],
+      });
+    read.push({ entry, field, value: understood.value, measuredBy: entry.measuredBy ?? self });
+  }
+  return read;
+};
+
+/** A second measurement needs its first, and another hand than the first's. */
+const secondHandWrong = (read: Read[], measured: (field: string) => PersonRef | undefined): Decision | null => {
+  for (const { field, measuredBy } of read) {
+    if (!field.confirms) continue;
+    const own = read.find((one) => one.field.key === field.confirms);
+    const first = own?.measuredBy ?? measured(field.confirms);
+    if (!first) return refuse('first-measurement-missing', { missing: [`field:${field.confirms}`] });
+    if (samePerson(first, measuredBy)) return refuse('same-person-measured', { params: { name: measuredBy.name } });
+  }
+  return null;
+};
+
+const toEntries = (commandId: string, read: Read[]): RecordedEntry[] =>
+  read.map(({ entry, field, value, measuredBy }, index) => ({
+    id: `${commandId}:${index}`,
+    field: entry.field,
+    typed: entry.typed,
+    unit: entry.unit,
+    value,
+    site: field.site === true,
+    measuredBy,
+  }));
+
+const recordAtSite = (input: Deciding<'record'>): Decision => {
+  const self = { accountId: input.stamp.accountId, name: input.stamp.name };
+  const groups = siteGroups();
+  const read = readEntries(input.command.body.entries, (key) => fieldOf({ groups }, key), self);
+  if (!Array.isArray(read)) return read;
+  return accept(event(input, 'readings-recorded', { point: sitePoint, entries: toEntries(input.command.id, read), late: false }));
+};
+
+export const decideRecord: Decider<'record'> = (input) => {
+  const { state, command, at, stamp } = input;
+  if (command.body.point === sitePoint) return recordAtSite(input);
+  const point = pointNamed(state, command.body.point);
+  if (!point) return refuse('no-such-point');
+  const self = { accountId: stamp.accountId, name: stamp.name };
+  const review = reviewPoint(state, point);
+  const read = readEntries(command.body.entries, (key) => fieldOf(review, key), self);
+  if (!Array.isArray(read)) return read;
+  if (read.every(({ field }) => field.site)) return recordAtSite(input);
+  const standing = standingOf(point, at.corrected);
+  if (isDecision(standing)) return standing;
+  const wrongHand = secondHandWrong(read, (field) => review.context.read(field)?.measuredBy);
+  if (wrongHand) return wrongHand;
+  const recorded = event(input, 'readings-recorded', {
+    point: point.place.id,
+    entries: toEntries(command.id, read),
+    late: standing.late,
+  });
+  return standing.withdraws ? accept(withdrawal(input, point.place.id), recorded) : accept(recorded);
+};
+
+export const decideAddPhoto: Decider<'add-photo'> = (input) => {
+  const { state, command, at } = input;
+  const { point: id, takenAt, ...rest } = command.body;
+  const point = pointNamed(state, id);
+  if (!point) return refuse('no-such-point');
+  const review = reviewPoint(state, point);
+  if (!review.shots.some((shot) => shot.key === rest.shot)) return refuse('no-such-shot', { params: { shot: rest.shot } });
+  const standing = standingOf(point, at.corrected);
+  if (isDecision(standing)) return standing;
+  const added = event(input, 'photo-added', { point: id, photo: command.id, ...rest, takenAt, late: standing.late });
+  return standing.withdraws ? accept(withdrawal(input, id), added) : accept(added);
+};
+
+export const decideSetPhotoAside: Decider<'set-photo-aside'> = (input) => {
+  const { state, command } = input;
+  const point = pointNamed(state, command.body.point);
+  if (!point) return refuse('no-such-point');
+  if (point.status !== 'open') return refuse('point-not-open', { since: point.release ?? point.presentation });
+  if (!standingPhotos(point.photos).some((photo) => photo.id === command.body.photo)) return refuse('no-such-photo');
+  return accept(event(input, 'photo-set-aside', command.body));
+};
+
+/** What would be judged if this act began at `at`: the screen asks the same before the tap. */
+export const judgeActBegin = (state: JobState, point: PointState, act: string, at: string) => {
+  const context = contextOf(state, point);
+  const definition = definitionOf(point.place.kind);
+  const found = definition.acts(context).find((one) => one.key === act);
+  return found ? [...(found.flame ? judgeFlame(context, at) : []), ...(definition.beforeAct?.(context, act, at) ?? [])] : null;
+};
+
+export const decideBeginAct: Decider<'begin-act'> = (input) => {
+  const { state, command, at } = input;
+  const { point: id, act } = command.body;
+  const point = pointNamed(state, id);
+  if (!point) return refuse('no-such-point');
+  if (state.stopped) return refuse('work-stopped', { since: state.stopped });
+  if (point.status === 'shut') return refuse('point-shut');
+  if (point.status !== 'open') return refuse('point-not-open', { since: point.release ?? point.presentation });
+  const running = currentPoint(state)?.acts.find((run) => run.ended === null);
+  if (running) return refuse('act-running', { since: running.begun });
+  const verdicts = judgeActBegin(state, point, act, at.corrected);
+  if (verdicts === null) return refuse('no-such-act');
+  const blockers = verdicts.filter((verdict) => verdict.kind === 'stop' && verdict.outcome === 'outside');
+  if (blockers.length > 0) return refuse('act-not-ready', { blockers });
+  return accept(event(input, 'act-begun', { point: id, act, verdicts }));
+};
+
+export const decideEndAct: Decider<'end-act'> = (input) => {
+  const { state, command } = input;
+  const { point: id, act } = command.body;
+  const point = pointNamed(state, id);
+  if (!point) return refuse('no-such-point');
+  if (!point.acts.some((run) => run.act === act && run.ended === null)) return refuse('act-not-running');
+  return accept(event(input, 'act-ended', command.body));
+};
