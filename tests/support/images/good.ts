@@ -1,6 +1,6 @@
 import { aHeic, box } from './heic';
 import { aJpeg, aPng, withPngChunk, withSegment } from './make';
-import { aWebp, canvasChunk, losslessChunk, lossyChunk, riff, riffChunk } from './webp';
+import { aLossyWebp, aWebp, canvasChunk, losslessChunk, lossyChunk, riff, riffChunk } from './webp';
 import { exifBlock } from './exif';
 
 /** An honest photo and what it must be read as. */
@@ -96,7 +96,8 @@ export const goodImages: readonly GoodImage[] = [
     6,
   ),
   plain('a lossless WebP', aWebp(), 'image/webp', 1, 1),
-  plain('a lossy WebP', riff(lossyChunk(320, 240)), 'image/webp', 320, 240),
+  plain('a lossy WebP', aLossyWebp(), 'image/webp', 32, 24),
+  plain('a lossy WebP of a phone', riff(lossyChunk(320, 240)), 'image/webp', 320, 240),
   plain(
     'a WebP with EXIF',
     riff(canvasChunk(320, 240, 0x08), lossyChunk(320, 240), riffChunk('EXIF', exifBlock({ orientation: 8 }))),
