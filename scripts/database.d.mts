@@ -13,3 +13,4 @@ export interface DatabaseServer {
 }
 
 export function openDatabase(name?: string): Promise<DatabaseServer>;
+export function runningDatabase(name?: string): DatabaseServer;

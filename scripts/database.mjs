@@ -54,25 +54,8 @@ function environmentOf(settings, database) {
   };
 }
 
-/**
- * Starts the project's own MariaDB, or joins it when it runs already. The last one to leave stops it.
- * @param {string} [name] folder under .data: `mariadb` for work, `test-mariadb` for tests
- */
-export async function openDatabase(name = 'mariadb') {
-  await ensureDebianPackage('mariadb-server', ['mariadbd', 'mariadb-install-db', 'mariadb', 'mariadb-admin']);
-  mkdirSync(dataFolder, { recursive: true, mode: 0o700 });
-  const files = databaseFiles(name);
-  const settings = await alone(files, async () => {
-    const found = readSettings(files.settings);
-    if (runningServer(files) === undefined) {
-      const keeps = found.port > 0 && (await portIsFree(found.port));
-      if (!keeps) found.port = await anyFreePort();
-      writeSettings(files.settings, found);
-      await startServer(files, found.port);
-    }
-    signIn(files.users);
-    return found;
-  });
+/** What can be done with a running database server. */
+function handleOf(files, settings) {
   return {
     port: settings.port,
     owner: settings.owner,
@@ -91,4 +74,33 @@ export async function openDatabase(name = 'mariadb') {
         if (!signOutAndSeeOthers(files.users)) await stopServer(files);
       }),
   };
+}
+
+/**
+ * Starts the project's own MariaDB, or joins it when it runs already. The last one to close it stops it.
+ * @param {string} [name] folder under .data: `mariadb` for work, `test-mariadb` for tests
+ */
+export async function openDatabase(name = 'mariadb') {
+  await ensureDebianPackage('mariadb-server', ['mariadbd', 'mariadb-install-db', 'mariadb', 'mariadb-admin']);
+  mkdirSync(dataFolder, { recursive: true, mode: 0o700 });
+  const files = databaseFiles(name);
+  const settings = await alone(files, async () => {
+    const found = readSettings(files.settings);
+    if (runningServer(files) === undefined) {
+      const keeps = found.port > 0 && (await portIsFree(found.port));
+      if (!keeps) found.port = await anyFreePort();
+      writeSettings(files.settings, found);
+      await startServer(files, found.port);
+    }
+    signIn(files.users);
+    return found;
+  });
+  return handleOf(files, settings);
+}
+
+/** The server that another process of this run holds open; it is not kept alive by this one. */
+export function runningDatabase(name = 'mariadb') {
+  const files = databaseFiles(name);
+  if (runningServer(files) === undefined) throw new Unmet(`The database ${name} does not run.`);
+  return handleOf(files, readSettings(files.settings));
 }

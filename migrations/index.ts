@@ -1,0 +1,8 @@
+import type { MigrationInterface } from 'typeorm';
+import { AccountsAndCatalogue0001 } from './0001-accounts-and-catalogue';
+
+/**
+ * Every migration in its order, one line for each; what has landed is never edited. A class is called for what it makes;
+ * its `name` ends in a number of thirteen digits that grows, as TypeORM sorts by it.
+ */
+export const migrations: (new () => MigrationInterface)[] = [AccountsAndCatalogue0001];

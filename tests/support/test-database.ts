@@ -1,0 +1,52 @@
+import type { DataSource } from 'typeorm';
+import { runningDatabase } from '../../scripts/database.mjs';
+import { readConfig } from '../../server/config';
+import type { Config } from '../../server/config';
+import { makeDataSource, openDataSource } from '../../server/data-source';
+import { migrateDatabase } from '../../server/migrate-database';
+import { aFolder } from './a-folder';
+
+export interface TestDatabase {
+  /** as the application signs in: reading and adding only on event tables */
+  app: DataSource;
+  /** as migrations sign in */
+  owner: DataSource;
+  config: Config;
+  environment: Record<string, string>;
+  drop(): Promise<void>;
+}
+
+let made = 0;
+
+/** A database of its own, migrated and empty, on the MariaDB of this run. */
+export async function aDatabase(settings: Record<string, string> = {}): Promise<TestDatabase> {
+  const server = runningDatabase('test-mariadb');
+  made += 1;
+  const name = `headfast${process.pid}x${made}`;
+  server.createDatabase(name);
+  const folder = aFolder();
+  const environment = {
+    ...server.ownerEnvironment(name),
+    HEADFAST_HOME: folder.path,
+    DATABASE_POOL: '10',
+    LOG_LEVEL: 'silent',
+    DEMO: '1',
+    ...settings,
+  };
+  const config = readConfig(environment);
+  const owner = await makeDataSource(config, 'owner').initialize();
+  await migrateDatabase(owner, config.database.user);
+  const app = await openDataSource(makeDataSource(config));
+  return {
+    app,
+    owner,
+    config,
+    environment,
+    drop: async () => {
+      if (app.isInitialized) await app.destroy();
+      await owner.destroy();
+      server.dropDatabase(name);
+      folder.remove();
+    },
+  };
+}
