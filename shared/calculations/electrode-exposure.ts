@@ -26,7 +26,7 @@ export const EXPOSURE_LIMITS = {
 type Strength = keyof typeof EXPOSURE_LIMITS.byStrength;
 const isStrength = (text: string): text is Strength => Object.hasOwn(EXPOSURE_LIMITS.byStrength, text);
 
-const CLASS = /^E(?<strength>\d{2,3})(?<position>\d)(?<coating>\d)(?<rest>(?:M|-?[A-Z0-9]+)*)$/;
+const CLASS = /^E(?<strength>\d{2,3})(?<position>\d)(?<coating>\d)(?<rest>[A-Z0-9-]*)$/;
 
 /** The longest exposure of a class such as `E7018` or `E7018-1 H4R`; null where the table sets none (cellulosic). */
 export const exposureLimit = (electrodeClass: string): Outcome<{ limitMinutes: number | null }> => {

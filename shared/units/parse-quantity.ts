@@ -34,6 +34,7 @@ interface Exact {
 
 const DECIMAL_PLACES = 6;
 const WHOLE_DIGITS = 9;
+const LONGEST_TEXT = 60;
 const TAPE_DENOMINATORS = new Set([2, 4, 8, 16, 32, 64]);
 
 const SHAPE =
@@ -90,6 +91,7 @@ const settleComma = (text: string, defaultUnit: Unit): string | ParseRefusal => 
  * Source: an inch is 25.4 mm (NIST SP 811); fractions are kept exact.
  */
 export const parseQuantity = (typed: string, defaultUnit: Unit): ParsedQuantity => {
+  if (typed.length > LONGEST_TEXT) return refuse('quantity-not-understood');
   const plain = plainText(typed);
   if (plain === '') return refuse('quantity-empty');
   const text = settleComma(plain, defaultUnit);

@@ -62,7 +62,7 @@ export const UNITS = {
   kJPerMm: { dimension: 'heat-input', size: 1, symbol: 'kJ/mm' },
   J: { dimension: 'energy', size: 1, symbol: 'J' },
   kJ: { dimension: 'energy', size: 1000, symbol: 'kJ' },
-  ftLbf: { dimension: 'energy', size: 1.3558179483314004, symbol: 'ft·lbf' },
+  ftLbf: { dimension: 'energy', size: POUND_KG * 9.80665 * 0.3048, symbol: 'ft·lbf' },
   count: { dimension: 'count', size: 1, symbol: '' },
 } as const satisfies Record<string, UnitFacts>;
 
