@@ -2,7 +2,7 @@ import type { MigrationInterface, QueryRunner } from 'typeorm';
 
 /** The files of a job, who sent them, and how many an account sends at a time. */
 export class JobFiles0003 implements MigrationInterface {
-  name = 'JobFiles1767225600003';
+  readonly name = 'JobFiles1700000000003';
 
   async up(runner: QueryRunner): Promise<void> {
     await runner.query(`CREATE TABLE job_files (
