@@ -15,6 +15,7 @@ export * from './drift';
 export * from './electrode-exposure';
 export * from './fillet-plan';
 export * from './fillet-undersize';
+export * from './fit-up-gap';
 export * from './flange-bolting';
 export * from './flange-table';
 export * from './flange-tilt';

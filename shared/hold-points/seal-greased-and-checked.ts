@@ -1,0 +1,124 @@
+import type { PointContext } from './context';
+import type { GroupDefinition, PointDefinition } from './definition';
+import { doneBefore } from './done-before';
+import { check, choice, quantity, words } from './fields';
+import { bySetting, commonPractice, judgeCheck, judgeFact, judgeRange } from './judging';
+import { namedDirection } from './named-direction';
+import type { Verdict } from './verdict';
+
+const hasSeal = (context: PointContext): boolean => context.state.plan.head.seals > 0;
+
+/** A seal that nobody could see or feel has no state that anybody could vouch for. */
+const stateKnown = (context: PointContext): boolean => context.value('seal.sight') !== 'not-seen';
+
+const greased = ['greased.casing', 'greased.head'] as const;
+
+const sealGroups = (context: PointContext): GroupDefinition[] => [
+  { key: 'seal-before', fields: [words('seal.part'), words('seal.condition'), check('seal.sound')] },
+  {
+    key: 'grease',
+    fields: [
+      words('grease.product'),
+      quantity('grease.clear', 'in', { likely: { min: 0.25, max: Number(context.state.plan.head.socketDepthIn) } }),
+      ...greased.map((key) => check(key)),
+    ],
+  },
+  {
+    key: 'seal-after',
+    fields: [
+      choice('seal.sight', ['seen', 'felt', 'not-seen']),
+      choice('seal.state-after', ['sound', 'rolled-or-cut'], { required: stateKnown(context) }),
+    ],
+  },
+];
+
+/** Named and marked before the head is lifted: turning it over the seal rolls the seal. */
+const judgeDirection = (context: PointContext): Verdict[] => [
+  ...judgeFact(context, {
+    limit: 'direction-named',
+    kind: 'stop',
+    about: ['direction-marked'],
+    source: commonPractice,
+    params: { direction: namedDirection(context) },
+    holds: context.state.direction !== null,
+  }),
+  ...judgeCheck(context, 'direction-marked', 'stop'),
+];
+
+const judgeSeal = (context: PointContext): Verdict[] => {
+  const [sight, after] = [context.value('seal.sight'), context.value('seal.state-after')];
+  return [
+    ...judgeCheck(context, 'seal.sound', 'stop'),
+    ...judgeFact(context, {
+      limit: 'seal.state-after',
+      kind: 'stop',
+      about: ['seal.state-after'],
+      source: commonPractice,
+      holds: after === undefined ? undefined : after === 'sound',
+    }),
+    ...judgeFact(context, {
+      limit: 'seal.sight',
+      kind: 'hold',
+      about: ['seal.sight'],
+      source: commonPractice,
+      holds: sight === undefined ? undefined : sight !== 'not-seen',
+    }),
+  ];
+};
+
+const judgeGrease = (context: PointContext): Verdict[] => [
+  ...greased.flatMap((field) => judgeCheck(context, field, 'hold')),
+  ...judgeRange(context, {
+    limit: 'grease.clear',
+    kind: 'hold',
+    about: ['grease.clear'],
+    measured: context.number('grease.clear'),
+    min: context.setting('greaseClearIn'),
+    unit: 'in',
+    source: bySetting(context, 'greaseClearIn'),
+  }),
+];
+
+/** Before the lift every check that can't be made up for afterwards has to be answered with yes. */
+const judgeBeforeLift = (context: PointContext): Verdict[] => {
+  const answered = (field: string, says: string): Verdict[] =>
+    judgeFact(context, {
+      limit: field,
+      kind: 'stop',
+      about: [field],
+      source: commonPractice,
+      says,
+      holds: context.value(field) === 'yes',
+    });
+  return [
+    ...judgeDirection(context).filter((verdict) => verdict.limit === 'direction-named'),
+    ...answered('direction-marked', 'direction-marked'),
+    ...(hasSeal(context) ? answered('seal.sound', 'seal-sound-before-lift') : []),
+  ];
+};
+
+/** Point 5: the seal is looked at before and after the head goes over it. Without a seal only the direction is left. */
+export const sealGreasedAndChecked: PointDefinition = {
+  kind: 'seal-greased-and-checked',
+  version: 1,
+  groups: (context) => [
+    { key: 'direction', fields: [check('direction-marked')] },
+    ...(hasSeal(context) ? sealGroups(context) : []),
+  ],
+  shots: (context) =>
+    hasSeal(context)
+      ? [
+          { key: 'seal-before', required: true },
+          { key: 'seal-after', required: stateKnown(context) },
+        ]
+      : [],
+  acts: (context) => [{ key: 'set-head', flame: false, required: !doneBefore(context, 'set-head') }],
+  statements: [],
+  cautions: (context) => ['suspended-head', ...(hasSeal(context) ? ['grease'] : [])],
+  compute: () => [],
+  judge: (context) => [
+    ...judgeDirection(context),
+    ...(hasSeal(context) ? [...judgeSeal(context), ...judgeGrease(context)] : []),
+  ],
+  beforeAct: (context) => judgeBeforeLift(context),
+};
