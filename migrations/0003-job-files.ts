@@ -15,7 +15,7 @@ export class JobFiles0003 implements MigrationInterface {
       uploaded_by char(36) NOT NULL,
       created_at datetime(3) NOT NULL,
       PRIMARY KEY (job_id, sha256),
-      CONSTRAINT job_files_account FOREIGN KEY (uploaded_by) REFERENCES accounts (id)
+      CONSTRAINT job_files_account FOREIGN KEY (uploaded_by) REFERENCES accounts (id) ON DELETE NO ACTION ON UPDATE NO ACTION
     ) ENGINE=InnoDB`);
     await runner.query(`CREATE TABLE job_file_uploaders (
       job_id char(36) NOT NULL,
@@ -23,14 +23,14 @@ export class JobFiles0003 implements MigrationInterface {
       account_id char(36) NOT NULL,
       created_at datetime(3) NOT NULL,
       PRIMARY KEY (job_id, sha256, account_id),
-      CONSTRAINT job_file_uploaders_account FOREIGN KEY (account_id) REFERENCES accounts (id)
+      CONSTRAINT job_file_uploaders_account FOREIGN KEY (account_id) REFERENCES accounts (id) ON DELETE NO ACTION ON UPDATE NO ACTION
     ) ENGINE=InnoDB`);
     await runner.query(`CREATE TABLE upload_counts (
       account_id char(36) NOT NULL,
       window_start datetime(3) NOT NULL,
       files int unsigned NOT NULL,
       PRIMARY KEY (account_id),
-      CONSTRAINT upload_counts_account FOREIGN KEY (account_id) REFERENCES accounts (id)
+      CONSTRAINT upload_counts_account FOREIGN KEY (account_id) REFERENCES accounts (id) ON DELETE NO ACTION ON UPDATE NO ACTION
     ) ENGINE=InnoDB`);
   }
 
