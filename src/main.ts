@@ -1,7 +1,6 @@
 import { createPinia } from 'pinia';
 import { createApp } from 'vue';
 import App from './App.vue';
-import { i18n } from './i18n';
 import { makeRouter } from './router';
 
-createApp(App).use(createPinia()).use(i18n).use(makeRouter()).mount('#app');
+createApp(App).use(createPinia()).use(makeRouter()).mount('#app');

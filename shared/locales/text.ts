@@ -5,6 +5,8 @@ export type TextParam = string | number | QuantityParam | InstantParam | Text;
 export interface QuantityParam {
   readonly quantity: string;
   readonly unit: string;
+  /** a distance between two values rather than a point on a scale: it matters for temperatures */
+  readonly difference?: true;
 }
 
 /** A moment, ISO 8601. */

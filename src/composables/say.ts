@@ -1,10 +1,10 @@
 import { getCurrentInstance } from 'vue';
 import { printInstant } from '../../shared/locales/print-instant';
-import { hasWords, say as sayIn, type Formatters, type Messages } from '../../shared/locales/say';
+import { hasWords, say as sayIn, type Formatters } from '../../shared/locales/say';
 import type { Text, TextParam } from '../../shared/locales/text';
 import { printQuantity, quantityParts, type PrintedQuantity } from '../../shared/units/format';
-import { i18n } from '../i18n';
 import { usePreferencesStore } from '../stores/preferences';
+import { useMessages } from './language';
 import { useSiteZone } from './site-zone';
 
 export interface Sayer {
@@ -24,7 +24,7 @@ export interface Sayer {
 export function useSay(): Sayer {
   const preferences = usePreferencesStore();
   const zone = getCurrentInstance() === null ? () => 'UTC' : useSiteZone();
-  const messages = () => i18n.global.getLocaleMessage(i18n.global.locale.value) as Messages;
+  const messages = useMessages();
 
   const instant = (iso: string) => printInstant(iso, zone(), preferences.language);
   const formatters: Formatters = {
@@ -34,8 +34,8 @@ export function useSay(): Sayer {
   };
 
   return {
-    say: (text, params) => sayIn(messages(), asText(text, params), formatters),
-    has: (key) => hasWords(messages(), key),
+    say: (text, params) => sayIn(messages.value, asText(text, params), formatters),
+    has: (key) => hasWords(messages.value, key),
     instant,
     quantity: formatters.quantity,
     parts: (value, unit, difference) => quantityParts(value, unit, preferences.units, difference),
