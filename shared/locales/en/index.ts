@@ -4,6 +4,13 @@ import errors from './errors';
 import fileRefusals from './file-refusals';
 import calculations from './calculations';
 import photos from './photos';
+import drawing from './drawing';
+import entry from './entry';
+import job from './job';
+import limits from './limits';
+import points from './points';
+import refusals from './refusals';
+import signature from './signature';
 
 /** English, area by area: one import and one line for each, in the order of the alphabet. */
 export default {
@@ -12,4 +19,11 @@ export default {
   errors: { ...errors, ...fileRefusals },
   calculations,
   photos,
+  drawing,
+  entry,
+  job,
+  limits,
+  points,
+  refusals,
+  signature,
 };

@@ -1,0 +1,47 @@
+import type { Command } from '../../shared/contracts/commands';
+import type { JobEvent } from '../../shared/job/events';
+import type { SigningSecrets } from './signing';
+import { ask } from './client';
+import type { Answer } from './problem';
+
+/** One link of a job's chain as it travels. `body` may come as the canonical text that was hashed. */
+export interface WireEvent {
+  seq: number;
+  type: string;
+  schema: number;
+  body: unknown;
+  hash: string;
+  prevHash: string;
+  commandId: string;
+}
+
+export interface CommandAnswer {
+  events: WireEvent[];
+  seq: number;
+  /** the same command had arrived before: this is its first answer again */
+  replayed: boolean;
+}
+
+const place = (jobId: string) => `/api/jobs/${encodeURIComponent(jobId)}`;
+
+/** The job's events after a sequence number. */
+export const readEvents = (jobId: string, after: number): Promise<Answer<{ events: WireEvent[] }>> =>
+  ask('GET', `${place(jobId)}/events`, { query: { after } });
+
+/** Sends a command; the secrets of a signature travel beside it. A wrong PIN is an answer and ends no session. */
+export const sendCommand = (jobId: string, command: Command, signing?: SigningSecrets): Promise<Answer<CommandAnswer>> =>
+  ask('POST', `${place(jobId)}/commands`, {
+    body: signing === undefined ? { command } : { command, signing },
+    expects401: signing !== undefined,
+  });
+
+/** Sends a file's bytes under their hash; sending them again changes nothing. */
+export const sendFile = (jobId: string, sha256: string, bytes: Blob): Promise<Answer<unknown>> =>
+  ask('PUT', `${place(jobId)}/files/${sha256}`, { body: bytes });
+
+/** Where a photo of the job is fetched. */
+export const fileAddress = (jobId: string, sha256: string): string => `${place(jobId)}/files/${sha256}`;
+
+/** An event as the rules read it. */
+export const asEvent = ({ type, schema, body }: WireEvent): JobEvent =>
+  ({ type, schema, body: typeof body === 'string' ? (JSON.parse(body) as unknown) : body }) as JobEvent;
