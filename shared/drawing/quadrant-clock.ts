@@ -1,3 +1,4 @@
+import type { Text } from '../locales/text';
 import { toDecimal } from '../units/decimal';
 import type { Tone } from './primitives';
 import { onCircle, type Drawing, type Point, type Primitive } from './primitives';
@@ -81,7 +82,7 @@ export const quadrantClock = ({ values, unit, lowSideDegrees, outside = [] }: Qu
       ...(lowSideDegrees === null ? [] : lowSide(lowSideDegrees)),
     ],
     alternative: [
-      ...quarters.map((quarter) =>
+      ...quarters.map((quarter): Text =>
         values[quarter] === undefined
           ? { key: 'drawing.clock.not-read', params: { quarter } }
           : { key: 'drawing.clock.reads', params: { quarter, value: { quantity: toDecimal(values[quarter]), unit } } },

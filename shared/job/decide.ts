@@ -42,7 +42,7 @@ const deciders: { [T in Running]: Decider<T> } = {
 
 const planJob = (command: CommandOf<'plan-job'>, actor: JobActor, at: Times): Decision => {
   const { plan } = command.body;
-  const blockers = planFaults(plan).filter((verdict) => verdict.kind === 'stop' && verdict.outcome === 'outside');
+  const blockers = planFaults(plan, at.corrected.slice(0, 10)).filter((verdict) => verdict.kind === 'stop' && verdict.outcome === 'outside');
   if (blockers.length > 0) return refuse('plan-not-workable', { blockers });
   const stamp = { accountId: actor.accountId, name: actor.name, role: 'coordinator' as const };
   return accept(event({ stamp, at, command }, 'job-planned', { plan, definitions: definitionsVersion }));

@@ -1,0 +1,21 @@
+/** The limits that an operator's programme may replace. */
+export default {
+  gasFreshMin: 'Gas check stands for',
+  lelMaxPct: 'Flammable gas, highest for hot work',
+  tapesAgreeIn: 'First and second tape agree within',
+  markAgreesIn: 'Mark agrees with the computed mark within',
+  stubAboveMarkIn: 'Stub left above the mark, at least',
+  takeoffAgreesIn: 'Measured takeoff agrees with the drawing within',
+  cutHighIn: 'Final cut high, at most',
+  cutLowIn: 'Final cut low, at most',
+  cutSpreadIn: 'Spread of the cut, at most',
+  greaseClearIn: 'Grease kept clear of the weld, at least',
+  rotationDeg: 'Two-hole error, at most',
+  tiltDeg: 'Flange tilt, at most',
+  datumWithinIn: 'Datum height within',
+  passTemperatureMin: 'Temperature read before a pass, within',
+  touchF: 'Cool enough to touch at',
+  collapseSharePct: 'Test pressure, share of the casing’s collapse',
+  gaugeLowPct: 'Gauge: target at least this share of full scale',
+  gaugeHighPct: 'Gauge: target at most this share of full scale',
+};
