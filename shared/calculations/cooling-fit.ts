@@ -1,3 +1,5 @@
+import { greatest, least } from './extremes';
+
 /** A temperature with its time, on any clock that runs in minutes. */
 export interface CoolingReading {
   readonly minute: number;
@@ -50,12 +52,12 @@ const GOLDEN = (Math.sqrt(5) - 1) / 2;
  * section. Null when the best k lies at the edge of the scan: the readings do not bend enough to show an ambient.
  */
 export const fitWithoutAmbient = (readings: readonly CoolingReading[]): Curve | null => {
-  const span = Math.max(...readings.map(({ minute }) => minute));
+  const span = greatest(readings.map(({ minute }) => minute));
   const [low, high] = [Math.log(0.01 / span), Math.log(50 / span)];
   const step = (high - low) / STEPS;
   const squaresAt = (logK: number): number => curveAt(readings, Math.exp(logK)).squares;
   const scan = Array.from({ length: STEPS + 1 }, (_, index) => squaresAt(low + index * step));
-  const best = scan.indexOf(Math.min(...scan));
+  const best = scan.indexOf(least(scan));
   if (best <= 0 || best >= STEPS) return null;
   let [left, right] = [low + (best - 1) * step, low + (best + 1) * step];
   for (let round = 0; round < 80; round += 1) {
@@ -64,6 +66,6 @@ export const fitWithoutAmbient = (readings: readonly CoolingReading[]): Curve | 
     else left = right - inner;
   }
   const curve = curveAt(readings, Math.exp((left + right) / 2));
-  const coldest = Math.min(...readings.map(({ temperatureF }) => temperatureF));
+  const coldest = least(readings.map(({ temperatureF }) => temperatureF));
   return curve.above > 0 && curve.ambient < coldest ? curve : null;
 };

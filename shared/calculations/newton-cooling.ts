@@ -1,5 +1,6 @@
 import { fitWithAmbient, fitWithoutAmbient, type CoolingReading } from './cooling-fit';
-import { firstRefusal, mustBe, refuse, type Outcome } from './outcome';
+import { greatest, least } from './extremes';
+import { firstRefusal, firstRefusalIn, mustBe, refuse, type Outcome } from './outcome';
 import { METAL_F } from './ranges';
 
 export const newtonCoolingInfo = {
@@ -9,6 +10,9 @@ export const newtonCoolingInfo = {
   source: "Newton's law of cooling",
   range: 'two readings with Ta given, three without; still air, nothing covered or uncovered in between',
 } as const;
+
+/** Readings closer than a second are one reading. */
+const SHORTEST_SPAN_MIN = 1 / 60;
 
 export interface CoolingFit {
   kPerMin: number;
@@ -35,20 +39,25 @@ export const coolingFit = (weld: {
     return refuse('too-few-readings', 'readings', { atLeast: needed });
   const refused = firstRefusal(
     ambientF === null ? null : mustBe('ambientF', ambientF, METAL_F),
-    ...readings.flatMap(({ minute, temperatureF }) => [
-      mustBe('minute', minute, { atLeast: -100_000, atMost: 100_000 }),
-      mustBe('temperatureF', temperatureF, METAL_F),
-    ]),
+    firstRefusalIn(readings, ({ minute, temperatureF }) =>
+      firstRefusal(
+        mustBe('minute', minute, { atLeast: -100_000, atMost: 100_000 }),
+        mustBe('temperatureF', temperatureF, METAL_F),
+      ),
+    ),
   );
   if (refused) return refused;
-  const startMinute = Math.min(...readings.map(({ minute }) => minute));
+  const startMinute = least(readings.map(({ minute }) => minute));
   const shifted = readings.map(({ minute, temperatureF }) => ({ minute: minute - startMinute, temperatureF }));
-  if (new Set(shifted.map(({ minute }) => minute)).size < needed) return refuse('readings-at-one-time', 'readings');
+  const span = greatest(shifted.map(({ minute }) => minute));
+  if (span < SHORTEST_SPAN_MIN || new Set(shifted.map(({ minute }) => minute)).size < needed)
+    return refuse('readings-at-one-time', 'readings');
   if (ambientF !== null && shifted.some(({ temperatureF }) => temperatureF <= ambientF)) {
     return refuse('reading-at-or-below-ambient', 'readings', { above: ambientF });
   }
   const curve = ambientF === null ? fitWithoutAmbient(shifted) : fitWithAmbient(shifted, ambientF);
-  if (curve === null) return refuse('no-fit-for-ambient', 'readings');
+  if (curve === null || !Number.isFinite(curve.k + curve.above + curve.ambient))
+    return refuse('no-fit-for-ambient', 'readings');
   if (!(curve.k > 0)) return refuse('not-cooling', 'readings');
   const at = (minute: number): number => curve.ambient + curve.above * Math.exp(-curve.k * minute);
   const misses = shifted.map(({ minute, temperatureF }) => Math.abs(temperatureF - at(minute)));
@@ -58,7 +67,7 @@ export const coolingFit = (weld: {
     ambientF: curve.ambient,
     startF: curve.ambient + curve.above,
     startMinute,
-    worstMissF: Math.max(...misses),
+    worstMissF: greatest(misses),
   };
 };
 
@@ -68,7 +77,7 @@ export const coolingTime = (
 ): Outcome<{ minute: number }> => {
   const { kPerMin, ambientF, startF, startMinute, targetF } = target;
   const refused = firstRefusal(
-    mustBe('kPerMin', kPerMin, { above: 0, atMost: 100 }),
+    mustBe('kPerMin', kPerMin, { atLeast: 1e-6, atMost: 100 }),
     mustBe('ambientF', ambientF, METAL_F),
     mustBe('startF', startF, { above: ambientF, atMost: 10_000 }),
     mustBe('startMinute', startMinute, { atLeast: -100_000, atMost: 100_000 }),

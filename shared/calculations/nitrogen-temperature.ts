@@ -14,6 +14,10 @@ const ATMOSPHERE_PSI = 14.696;
 export const NITROGEN_F = { atLeast: -60, atMost: 300 } as const;
 export const NITROGEN_PSIG = { atLeast: 0, atMost: 15_000 } as const;
 
+/** What a gauge shows on nitrogen of a density in mol/m³ at a temperature in °F, psig. */
+export const nitrogenGauge = (densityMolM3: number, temperatureF: number): number =>
+  convert(nitrogenPressurePa(densityMolM3, convert(temperatureF, 'degF', 'K')) / 1000, 'kPa', 'psi') - ATMOSPHERE_PSI;
+
 /** What a shut-in gauge on nitrogen shows after a change of temperature without any leak, psig. */
 export const nitrogenPressureAt = (gas: {
   pressurePsig: number;
@@ -30,6 +34,5 @@ export const nitrogenPressureAt = (gas: {
   const absolutePa = convert(pressurePsig + ATMOSPHERE_PSI, 'psi', 'kPa') * 1000;
   const densityMolM3 = nitrogenDensity(absolutePa, convert(temperatureF, 'degF', 'K'));
   if (densityMolM3 === null) return refuse('gas-denser-than-equation', 'pressurePsig', NITROGEN_PSIG);
-  const afterPa = nitrogenPressurePa(densityMolM3, convert(newTemperatureF, 'degF', 'K'));
-  return { ok: true, expectedPsig: convert(afterPa / 1000, 'kPa', 'psi') - ATMOSPHERE_PSI, densityMolM3 };
+  return { ok: true, expectedPsig: nitrogenGauge(densityMolM3, newTemperatureF), densityMolM3 };
 };

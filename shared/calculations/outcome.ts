@@ -65,6 +65,15 @@ export const mustBe = (input: string, value: number, range: Range): Refusal | nu
   return null;
 };
 
+/** The first refusal that checking a list one by one meets, or null; for lists as long as a recorder's. */
+export const firstRefusalIn = <Item>(items: readonly Item[], check: (item: Item) => Refusal | null): Refusal | null => {
+  for (const item of items) {
+    const refused = check(item);
+    if (refused) return refused;
+  }
+  return null;
+};
+
 /** The first refusal of a list of checks, or null. */
 export const firstRefusal = (...checks: readonly (Refusal | null)[]): Refusal | null =>
   checks.find((check) => check !== null) ?? null;

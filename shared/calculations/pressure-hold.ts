@@ -1,5 +1,6 @@
-import { nitrogenPressureAt } from './nitrogen-temperature';
-import { firstRefusal, mustBe, refuse, type Outcome } from './outcome';
+import { greatest, least } from './extremes';
+import { NITROGEN_F, nitrogenGauge, nitrogenPressureAt } from './nitrogen-temperature';
+import { firstRefusal, firstRefusalIn, mustBe, refuse, type Outcome } from './outcome';
 import { POSITIVE_PRESSURE_PSI, PRESSURE_PSI } from './ranges';
 
 export const pressureHoldInfo = {
@@ -63,26 +64,26 @@ const numbersFit = (test: HoldTest) =>
     mustBe('holdStartS', test.holdStartS, SECONDS),
     mustBe('holdEndS', test.holdEndS, SECONDS),
     mustBe('toleranceS', test.toleranceS, { atLeast: 0, atMost: 3600 }),
-    ...test.samples.flatMap(({ timeS, pressurePsig, temperatureF }) => [
-      mustBe('timeS', timeS, SECONDS),
-      mustBe('pressurePsig', pressurePsig, { atLeast: -15, atMost: 100_000 }),
-      temperatureF === undefined ? null : mustBe('temperatureF', temperatureF, { atLeast: -60, atMost: 300 }),
-    ]),
+    firstRefusalIn(test.samples, ({ timeS, pressurePsig, temperatureF }) =>
+      firstRefusal(
+        mustBe('timeS', timeS, SECONDS),
+        mustBe('pressurePsig', pressurePsig, { atLeast: -15, atMost: 100_000 }),
+        temperatureF === undefined ? null : mustBe('temperatureF', temperatureF, NITROGEN_F),
+      ),
+    ),
   );
 
 /** Largest unexplained fall against the first reading; null when a temperature is missing at either end. */
 const correctedDrop = (first: HoldSample, last: HoldSample, during: readonly HoldSample[]): number | null => {
   const startF = first.temperatureF;
   if (startF === undefined || last.temperatureF === undefined) return null;
-  let worst = 0;
-  for (const { pressurePsig, temperatureF } of during) {
-    if (temperatureF === undefined) continue;
-    const gas = { pressurePsig: first.pressurePsig, temperatureF: startF, newTemperatureF: temperatureF };
-    const expected = nitrogenPressureAt(gas);
-    if (!expected.ok) return null;
-    worst = Math.max(worst, expected.expectedPsig - pressurePsig);
-  }
-  return worst;
+  const start = { pressurePsig: first.pressurePsig, temperatureF: startF, newTemperatureF: startF };
+  const gas = nitrogenPressureAt(start);
+  if (!gas.ok) return null;
+  const unexplained = during.map(({ pressurePsig, temperatureF }) =>
+    temperatureF === undefined ? 0 : nitrogenGauge(gas.densityMolM3, temperatureF) - pressurePsig,
+  );
+  return Math.max(0, greatest(unexplained));
 };
 
 /**
@@ -101,7 +102,7 @@ export const pressureHold = (test: HoldTest): Outcome<PressureHold> => {
     return refuse('too-few-readings', 'samples', { atLeast: 2 });
   }
   const pressures = during.map(({ pressurePsig }) => pressurePsig);
-  const [lowestPsig, highestPsig] = [Math.min(...pressures), Math.max(...pressures)];
+  const [lowestPsig, highestPsig] = [least(pressures), greatest(pressures)];
   const dropPsi = first.pressurePsig - lowestPsig;
   const correctedDropPsi = test.medium === 'nitrogen' ? correctedDrop(first, last, during) : null;
   const times = [holdStartS, ...during.map(({ timeS }) => timeS), holdEndS];
@@ -127,6 +128,6 @@ export const pressureHold = (test: HoldTest): Outcome<PressureHold> => {
     ratePsiPerMin: minutes > 0 ? (first.pressurePsig - last.pressurePsig) / minutes : 0,
     correctedDropPsi,
     judgedBy: correctedDropPsi === null ? 'as-read' : 'temperature-corrected',
-    longestGapS: gaps.reduce((most, gap) => Math.max(most, gap), 0),
+    longestGapS: Math.max(0, greatest(gaps)),
   };
 };

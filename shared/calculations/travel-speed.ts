@@ -6,10 +6,10 @@ export const travelSpeedInfo = {
   version: 1,
   formula: 'S = length/arc time; round the casing: π·OD/arc time',
   source: 'definition of travel speed',
-  range: 'arc time above 0 to 600 min',
+  range: 'arc time 0.01 to 600 min',
 } as const;
 
-const ARC_MINUTES = { above: 0, atMost: 600 } as const;
+const ARC_MINUTES = { atLeast: 0.01, atMost: 600 } as const;
 
 /** Travel speed of a full pass round the casing, in/min, from the time the arc burned. Several welders share a pass. */
 export const travelSpeedRound = (pass: {
