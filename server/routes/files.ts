@@ -1,13 +1,13 @@
 import { Router } from 'express';
 import type { Request } from 'express';
 import { getFile, putFile } from '../../shared/contracts/files';
-import type { JobScope } from '../../shared/permissions';
 import type { FileRefusal } from '../../shared/photos/refusals';
 import { sendFile } from '../middleware/file-answer';
 import { bytesOfBody, drainBody, kindOfBody, lengthOfBody } from '../middleware/file-body';
 import { Problem } from '../middleware/problem';
 import type { AppDeps } from '../services/deps';
 import { findJobFile } from '../services/find-job-file';
+import { findJobScope } from '../services/find-job-scope';
 import { jobFileRegister } from '../services/register-job-file';
 import { storeFile } from '../services/store-file';
 import { takeUpload } from '../services/take-upload';
@@ -17,12 +17,12 @@ import { mount } from './mount';
 const statusOf = (code: FileRefusal): number =>
   code.endsWith('.too-large') ? 413 : code === 'file.incomplete' ? 400 : 422;
 
-/** Sending and reading the files of a job; `scopeOf` says who is on it, null when there is no such job. */
-export function fileRoutes(deps: AppDeps, scopeOf: (jobId: string) => Promise<JobScope | null>): Router {
+/** Sending and reading the files of a job. */
+export function fileRoutes(deps: AppDeps): Router {
   const router = Router();
   const storage = makeStorage(deps.config, deps.ids);
   const register = jobFileRegister(deps.dataSource, deps.clock);
-  const job = (params: { id: string }) => scopeOf(params.id);
+  const job = (params: { id: string }) => findJobScope(deps.dataSource, params.id);
 
   mount(
     router,

@@ -2,20 +2,14 @@ import { createHash } from 'node:crypto';
 import { readdirSync } from 'node:fs';
 import http from 'node:http';
 import type { AddressInfo } from 'node:net';
-import express from 'express';
 import request from 'supertest';
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest';
 import type { DemoKey } from '../../server/demo/people';
-import { jsonBody } from '../../server/middleware/json-body';
-import { problemHandler } from '../../server/middleware/problem-handler';
-import { sameOrigin } from '../../server/middleware/same-origin';
-import { securityHeaders } from '../../server/middleware/security-headers';
-import { sessions } from '../../server/middleware/session';
-import { fileRoutes } from '../../server/routes/files';
-import { sessionRoutes } from '../../server/routes/session';
 import { filesUploadedBy } from '../../server/services/files-uploaded-by';
 import { UPLOADS_PER_WINDOW } from '../../server/services/take-upload';
-import type { JobScope } from '../../shared/permissions';
+import type { Role } from '../../shared/permissions';
+import { JobPersonView } from '../../server/entities/job-person-view';
+import { JobView } from '../../server/entities/job-view';
 import { hostileFiles } from '../support/images/hostile';
 import { aHeic } from '../support/images/heic';
 import { aJpeg, aPng } from '../support/images/make';
@@ -26,43 +20,44 @@ const sha256Of = (bytes: Buffer) => createHash('sha256').update(bytes).digest('h
 const photo = aJpeg(64, 48, { orientation: 6 });
 
 let house: TestApp;
-let app: express.Express;
-let jobs: Map<string, JobScope>;
 let own: string;
 let foreign: string;
 const agents = new Map<DemoKey, Agent>();
 
 beforeAll(async () => {
   house = await startTestApp();
-  const { deps } = house;
-  jobs = new Map();
-  app = express();
-  app.set('etag', false);
-  app.use(...securityHeaders(deps.config), sameOrigin(deps.config));
-  app.use('/api', ...jsonBody(), ...sessions(deps));
-  app.use(
-    sessionRoutes(deps),
-    fileRoutes(deps, async (id) => jobs.get(id) ?? null),
-  );
-  app.use(problemHandler(deps.log));
   for (const key of ['welder', 'secondWelder', 'companyRep', 'auditor', 'coordinator'] as const) {
-    const agent = request.agent(app);
-    const { email, password } = house.person(key);
-    await agent.post('/api/session').send({ email, password }).expect(200);
-    agents.set(key, agent);
+    agents.set(key, await house.agentFor(key));
   }
 });
 afterAll(() => house.stop());
 
-beforeEach(() => {
-  [own, foreign] = [house.deps.ids(), house.deps.ids()];
-  const people: JobScope['people'] = [
-    { accountId: house.person('welder').id, role: 'welder' },
-    { accountId: house.person('companyRep').id, role: 'company_rep' },
-  ];
-  jobs.set(own, { people, operatorId: house.deps.ids(), status: 'running' });
-  jobs.set(foreign, { people: [], operatorId: house.deps.ids(), status: 'running' });
+beforeEach(async () => {
+  own = await aRunningJob({ welder: 'welder', companyRep: 'company_rep' });
+  foreign = await aRunningJob({});
 });
+
+/** A job as far as permissions ask: who is on it, and that it runs. */
+async function aRunningJob(people: Partial<Record<DemoKey, Role>>): Promise<string> {
+  const { manager } = house.deps.dataSource;
+  const id = house.deps.ids();
+  const words = {
+    operator: 'Marrow Creek Resources',
+    rig: 'Pronghorn 7',
+    well: 'Tallgrass 14-2H',
+    zone: 'America/Denver',
+  };
+  const counts = { hot: false, stopped: false, concessions: 0, reopenings: 0, seq: 1 };
+  const times = { plannedAt: house.clock(), movedAt: house.clock() };
+  const rest = { casing: '9 5/8', head: 'slip-on', status: 'running', strip: '[]', search: '' };
+  await manager.insert(JobView, { id, operatorId: house.deps.ids(), ...words, ...counts, ...times, ...rest });
+  for (const [key, role] of Object.entries(people)) await join(id, key as DemoKey, role);
+  return id;
+}
+
+async function join(jobId: string, key: DemoKey, role: Role): Promise<void> {
+  await house.deps.dataSource.manager.insert(JobPersonView, { jobId, accountId: house.person(key).id, role });
+}
 
 const as = (key: DemoKey): Agent => agents.get(key) as Agent;
 const addressOf = (job: string, bytes: Buffer, sha256 = sha256Of(bytes)) => `/api/jobs/${job}/files/${sha256}`;
@@ -91,11 +86,7 @@ describe('sending a file', () => {
 
   test('twice, and by two people, changes nothing and remembers both', async () => {
     const first = await put('welder', own, photo).expect(200);
-    const people = [
-      ...(jobs.get(own)?.people ?? []),
-      { accountId: house.person('secondWelder').id, role: 'welder' as const },
-    ];
-    jobs.set(own, { ...(jobs.get(own) as JobScope), people });
+    await join(own, 'secondWelder', 'welder');
     expect((await put('welder', own, photo).expect(200)).body).toEqual(first.body);
     expect((await put('secondWelder', own, photo).expect(200)).body).toEqual(first.body);
     const { manager } = house.deps.dataSource;
@@ -161,7 +152,7 @@ describe('sending a file', () => {
 
   test('that breaks off in the middle leaves nothing', async () => {
     const before = stored();
-    const server = app.listen(0, '127.0.0.1');
+    const server = house.app.listen(0, '127.0.0.1');
     await new Promise((resolve) => server.once('listening', resolve));
     const signedIn = await request(server).post('/api/session').send(signInOf('welder'));
     const Cookie = String(signedIn.headers['set-cookie']).split(';')[0];
@@ -204,8 +195,8 @@ describe('who may', () => {
   });
 
   test('nobody without a session', async () => {
-    await request(app).put(addressOf(own, photo)).set('Content-Type', 'image/jpeg').send(photo).expect(401);
-    await request(app).get(addressOf(own, photo)).expect(401);
+    await house.guest().put(addressOf(own, photo)).set('Content-Type', 'image/jpeg').send(photo).expect(401);
+    await house.guest().get(addressOf(own, photo)).expect(401);
   });
 
   test('on a foreign job and on none the answer is the same', async () => {
@@ -218,7 +209,7 @@ describe('who may', () => {
 
   test('a file of another job is not found by its hash', async () => {
     await put('welder', own, photo).expect(200);
-    jobs.set(foreign, jobs.get(own) as JobScope);
+    await join(foreign, 'welder', 'welder');
     await as('welder').get(addressOf(foreign, photo)).expect(404);
   });
 

@@ -1,4 +1,4 @@
-import type { PixelSize, StructureResult } from './structure';
+import { MOST_PARTS, type PixelSize, type StructureResult } from './structure';
 
 interface Box {
   type: string;
@@ -40,7 +40,7 @@ export function walkHeic(bytes: Buffer): StructureResult {
 function boxesIn(bytes: Buffer, from: number, to: number): Box[] | null {
   const boxes: Box[] = [];
   for (let at = from; at < to;) {
-    if (at + 8 > to) return null;
+    if (at + 8 > to || boxes.length > MOST_PARTS) return null;
     const type = bytes.toString('latin1', at + 4, at + 8);
     let size = bytes.readUInt32BE(at);
     let body = at + 8;

@@ -1,4 +1,4 @@
-import type { PixelSize, StructureResult } from './structure';
+import { MOST_PARTS, type PixelSize, type StructureResult } from './structure';
 
 const APP0 = 0xe0;
 const APP1 = 0xe1;
@@ -17,6 +17,7 @@ export function walkJpeg(bytes: Buffer): StructureResult {
   let exif: Buffer | undefined;
   let headerEnd = 0;
   let scans = 0;
+  let parts = 0;
   let at = 2;
   while (at + 1 < bytes.length) {
     if (bytes[at] !== 0xff) return 'photo.truncated';
@@ -26,6 +27,8 @@ export function walkJpeg(bytes: Buffer): StructureResult {
       continue;
     }
     at += 2;
+    parts += 1;
+    if (parts > MOST_PARTS) return 'photo.truncated';
     if (marker === END_OF_IMAGE) {
       if (scans === 0 || sizes.length === 0) return 'photo.truncated';
       return { end: at, headerEnd, sizes, texts, ...(exif && { exif }) };

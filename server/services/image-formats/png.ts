@@ -1,5 +1,5 @@
 import { crc32 } from 'node:zlib';
-import type { PixelSize, StructureResult } from './structure';
+import { MOST_PARTS, type PixelSize, type StructureResult } from './structure';
 
 const SIGNATURE_LENGTH = 8;
 const TEXT_CHUNKS = ['tEXt', 'iTXt', 'zTXt'];
@@ -11,7 +11,7 @@ export function walkPng(bytes: Buffer): StructureResult {
   let exif: Buffer | undefined;
   let hasPixels = false;
   let at = SIGNATURE_LENGTH;
-  while (at + 12 <= bytes.length) {
+  for (let parts = 0; parts < MOST_PARTS && at + 12 <= bytes.length; parts += 1) {
     const length = bytes.readUInt32BE(at);
     const type = bytes.toString('latin1', at + 4, at + 8);
     const end = at + 12 + length;

@@ -22,4 +22,7 @@ export interface ImageStructure {
   texts: Buffer[];
 }
 
+/** More segments, chunks or boxes than this is no camera's file: it is made to keep the reader busy. */
+export const MOST_PARTS = 20_000;
+
 export type StructureResult = ImageStructure | PhotoRefusal;

@@ -1,4 +1,4 @@
-import type { PixelSize, StructureResult } from './structure';
+import { MOST_PARTS, type PixelSize, type StructureResult } from './structure';
 
 /** Walks a WebP's RIFF chunks (RFC 9649); the canvas and every picture in it state a size. */
 export function walkWebp(bytes: Buffer): StructureResult {
@@ -9,8 +9,8 @@ export function walkWebp(bytes: Buffer): StructureResult {
   const texts: Buffer[] = [];
   let exif: Buffer | undefined;
   let hasPixels = false;
-  for (let at = 12; at < end;) {
-    if (at + 8 > end) return 'photo.truncated';
+  for (let at = 12, parts = 0; at < end; parts += 1) {
+    if (at + 8 > end || parts > MOST_PARTS) return 'photo.truncated';
     const type = bytes.toString('latin1', at, at + 4);
     const length = bytes.readUInt32LE(at + 4);
     if (at + 8 + length > end) return 'photo.truncated';

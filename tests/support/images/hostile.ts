@@ -85,6 +85,25 @@ const truncated = many('photo.truncated', {
   'a WebP with a picture larger than its canvas': riff(canvasChunk(64, 48), lossyChunk(4000, 3000)),
   'a HEIC cut in its data': heic.subarray(0, heic.length - 10),
   'a HEIC with a box longer than the file': withLength(heic, 0x18, 0x00ffffff),
+  'a JPEG of a hundred thousand empty segments': Buffer.concat([
+    Buffer.from('ffd8', 'hex'),
+    Buffer.alloc(400_000, Buffer.from('ffe00002', 'hex')),
+    jpeg.subarray(2),
+  ]),
+  'a HEIC of a hundred thousand empty boxes': Buffer.concat([
+    heic,
+    Buffer.alloc(800_000, Buffer.from('0000000866726565', 'hex')),
+  ]),
+  'a PNG of fifty thousand empty chunks': Buffer.concat([
+    png.subarray(0, 33),
+    ...Array<Buffer>(50_000).fill(pngChunk('vpAg', Buffer.alloc(0))),
+    png.subarray(33),
+  ]),
+  'a WebP of fifty thousand empty chunks': riff(
+    canvasChunk(64, 48),
+    ...Array<Buffer>(50_000).fill(riffChunk('NONE', Buffer.alloc(0))),
+    lossyChunk(64, 48),
+  ),
   'a HEIC without properties': Buffer.concat([
     heic.subarray(0, 24),
     box('meta', Buffer.alloc(4)),
