@@ -3,6 +3,7 @@ import type { AppDeps } from '../services/deps';
 import { accountRoutes } from './account';
 import { catalogueRoutes } from './catalogue';
 import { clockRoutes } from './clock';
+import { fileRoutes } from './files';
 import { healthRoutes } from './health';
 import { sessionRoutes } from './session';
 
@@ -13,4 +14,5 @@ export const apiRoutes = (deps: AppDeps): Router[] => [
   accountRoutes(deps),
   catalogueRoutes(deps),
   clockRoutes(deps),
+  fileRoutes(deps),
 ];

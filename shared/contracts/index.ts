@@ -2,6 +2,7 @@ import { accountRoutes } from './account';
 import { catalogueRoutes } from './catalogue';
 import { clockRoutes } from './clock';
 import type { RouteContract } from './contract';
+import { fileRoutes } from './files';
 import { healthRoutes } from './health';
 import { sessionRoutes } from './session';
 
@@ -10,6 +11,7 @@ export const allRoutes: readonly RouteContract[] = [
   ...accountRoutes,
   ...catalogueRoutes,
   ...clockRoutes,
+  ...fileRoutes,
   ...healthRoutes,
   ...sessionRoutes,
 ];
