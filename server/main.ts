@@ -5,6 +5,8 @@ import { createApp } from './app';
 import { readConfig } from './config';
 import { openDeps } from './open-deps';
 import { runEntry } from './run-entry';
+import { sweepUploads } from './services/sweep-uploads';
+import { makeStorage } from './storage/make-storage';
 
 /** Requests that are running get this long to end before the process leaves. */
 const patienceMs = 5_000;
@@ -12,6 +14,8 @@ const patienceMs = 5_000;
 runEntry(async () => {
   const config = readConfig(process.env);
   const deps = await openDeps(config);
+  const swept = await sweepUploads(makeStorage(config, deps.ids), deps.clock());
+  if (swept > 0) deps.log.info({ files: swept }, 'half received files swept');
   const app = createApp(deps);
   const server = config.tls
     ? https.createServer({ cert: readFileSync(config.tls.cert), key: readFileSync(config.tls.key) }, app)
