@@ -1,6 +1,5 @@
 import type { PointContext } from './context';
 import type { GroupDefinition, PointDefinition } from './definition';
-import { doneBefore } from './done-before';
 import { check, choice, quantity, words } from './fields';
 import { bySetting, commonPractice, judgeCheck, judgeFact, judgeRange } from './judging';
 import { namedDirection } from './named-direction';
@@ -112,7 +111,8 @@ export const sealGreasedAndChecked: PointDefinition = {
           { key: 'seal-after', required: stateKnown(context) },
         ]
       : [],
-  acts: (context) => [{ key: 'set-head', flame: false, required: !doneBefore(context, 'set-head') }],
+  // Asked for again after a reopening: the head came off, or somebody vouches that it stands as it was set.
+  acts: () => [{ key: 'set-head', flame: false, required: true }],
   statements: [],
   cautions: (context) => ['suspended-head', ...(hasSeal(context) ? ['grease'] : [])],
   compute: () => [],
