@@ -54,6 +54,11 @@ export function readConfig(environment: Readonly<Record<string, string | undefin
   const origin = env.PUBLIC_ORIGIN && new URL(env.PUBLIC_ORIGIN).origin;
   const secure = origin ? origin.startsWith('https:') : tls !== null;
   refuseUnsafe({ onLoopback, secure, demo: env.DEMO, origin });
+  if (secure && !tls && env.TRUST_PROXY === 'false') {
+    throw new ConfigError(
+      'PUBLIC_ORIGIN is https: set TRUST_PROXY to the number of proxies in front, or TLS_CERT and TLS_KEY.',
+    );
+  }
   return {
     home,
     host: env.HOST,

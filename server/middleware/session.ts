@@ -5,7 +5,7 @@ import { Strategy } from 'passport-local';
 import type { AppDeps } from '../services/deps';
 import { checkSignIn } from '../services/check-sign-in';
 import type { SignInAnswer } from '../services/check-sign-in';
-import { SessionStore } from '../services/session-store';
+import { SessionStore } from './session-store';
 import { loadAccount } from '../services/signed-in-account';
 import type { SignedInAccount } from '../services/signed-in-account';
 

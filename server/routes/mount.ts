@@ -75,12 +75,15 @@ function parsed(schema: z.ZodType | undefined, value: unknown, place: string): u
   const result = schema.safeParse(value);
   if (result.success) return result.data;
   const fields = result.error.issues.slice(0, 50).map((issue) => {
-    const code =
-      issue.code === 'invalid_type' && issue.input === undefined ? 'missing' : issue.code.replaceAll('_', '-');
+    const missing = issue.code === 'invalid_type' && valueAt(value, issue.path) === undefined;
+    const code = missing ? 'missing' : issue.code.replaceAll('_', '-');
     return { path: [place, ...issue.path].join('.'), code, detail: detailOf(`field.${code}`) };
   });
   throw new Problem(422, 'request.invalid', { fields });
 }
+
+const valueAt = (value: unknown, path: readonly PropertyKey[]): unknown =>
+  path.reduce<unknown>((at, key) => (typeof at === 'object' && at !== null ? Reflect.get(at, key) : undefined), value);
 
 function send(route: RouteContract, res: Response, answer: unknown): void {
   if (!(route.response instanceof z.ZodType)) {

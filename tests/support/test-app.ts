@@ -32,9 +32,12 @@ export interface TestApp {
   stop(): Promise<void>;
 }
 
-/** The whole server on a database of its own with the demo's people and catalogue; its clock is moved by hand. */
-export async function startTestApp(settings: Record<string, string> = {}): Promise<TestApp> {
-  const database = await aDatabase(settings);
+/**
+ * The whole server on a database of its own with the demo's people and catalogue; its clock is moved by hand.
+ * @param databasePort another way to the same database, such as a relay that a test cuts
+ */
+export async function startTestApp(settings: Record<string, string> = {}, databasePort?: number): Promise<TestApp> {
+  const database = await aDatabase(settings, databasePort);
   const clock = aClock();
   const logged: string[] = [];
   const deps: AppDeps = {

@@ -19,7 +19,7 @@ export interface TestDatabase {
 let made = 0;
 
 /** A database of its own, migrated and empty, on the MariaDB of this run. */
-export async function aDatabase(settings: Record<string, string> = {}): Promise<TestDatabase> {
+export async function aDatabase(settings: Record<string, string> = {}, port?: number): Promise<TestDatabase> {
   const server = runningDatabase('test-mariadb');
   made += 1;
   const name = `headfast${process.pid}x${made}`;
@@ -32,9 +32,11 @@ export async function aDatabase(settings: Record<string, string> = {}): Promise<
     LOG_LEVEL: 'silent',
     DEMO: '1',
     ...settings,
+    ...(port !== undefined && { DATABASE_PORT: String(port) }),
   };
   const config = readConfig(environment);
-  const owner = await makeDataSource(config, 'owner').initialize();
+  const direct = readConfig({ ...environment, DATABASE_PORT: String(server.port) });
+  const owner = await makeDataSource(direct, 'owner').initialize();
   await migrateDatabase(owner, config.database.user);
   const app = await openDataSource(makeDataSource(config));
   return {

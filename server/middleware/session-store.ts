@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { Store } from 'express-session';
 import type { SessionData } from 'express-session';
 import { SessionRow } from '../entities/session-row';
-import type { AppDeps } from './deps';
+import type { AppDeps } from '../services/deps';
 
 declare module 'express-session' {
   interface SessionData {
