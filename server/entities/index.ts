@@ -2,8 +2,14 @@ import { Account } from './account';
 import { AccountRole } from './account-role';
 import { AttemptThrottle } from './attempt-throttle';
 import { CatalogueItem } from './catalogue-item';
+import { CommandReceipt } from './command-receipt';
+import { DeskView } from './desk-view';
+import { JobEventRow } from './job-event';
 import { JobFile } from './job-file';
 import { JobFileUploader } from './job-file-uploader';
+import { JobHead } from './job-head';
+import { JobPersonView } from './job-person-view';
+import { JobView } from './job-view';
 import { Operator } from './operator';
 import { OperatorGrant } from './operator-grant';
 import { Rig } from './rig';
@@ -16,8 +22,14 @@ export const entities = [
   AccountRole,
   AttemptThrottle,
   CatalogueItem,
+  CommandReceipt,
+  DeskView,
+  JobEventRow,
   JobFile,
   JobFileUploader,
+  JobHead,
+  JobPersonView,
+  JobView,
   Operator,
   OperatorGrant,
   Rig,

@@ -1,5 +1,6 @@
 import account from './account';
 import app from './app';
+import commandErrors from './command-errors';
 import errors from './errors';
 import fileRefusals from './file-refusals';
 import calculations from './calculations';
@@ -16,7 +17,7 @@ import signature from './signature';
 export default {
   account,
   app,
-  errors: { ...errors, ...fileRefusals },
+  errors: { ...errors, ...fileRefusals, command: commandErrors.command, field: { ...errors.field, ...commandErrors.field } },
   calculations,
   photos,
   drawing,

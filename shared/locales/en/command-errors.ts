@@ -1,0 +1,24 @@
+/** What is said of a command or a plan that was not recorded; the rules' own words stand under `refusals`. */
+export default {
+  command: {
+    conflict: 'Somebody was faster, or the job has moved on since. Nothing was recorded.',
+    blocked: 'Something stands in the way. Nothing was recorded.',
+    forbidden: 'This is not yours to do on this job. Nothing was recorded.',
+    'id-taken': 'This entry cannot be taken under its number.',
+    'id-reused': 'Another entry was already sent under the same number. Nothing was recorded.',
+    'text-broken': 'The text holds half a character and cannot be kept. Type it again.',
+    'file-not-sent': 'The photo has not arrived here from you yet. Send it first.',
+    'file-no-photo': 'This file is not a photo.',
+    'head-unknown': 'There is no such casing head in the set-up.',
+    'person-unknown': 'There is no such person, or the account is closed.',
+    'person-without-role': 'This person does not have that role.',
+    'person-on-both-sides': 'Nobody is of the firm and a guest on one job.',
+  },
+  field: {
+    unknown: 'There is nothing of that name in the set-up.',
+    'person-unknown': 'There is no such person, or the account is closed.',
+    'person-without-role': 'This person does not have that role.',
+    'person-on-both-sides': 'Nobody is of the firm and a guest on one job.',
+    'person-twice': 'This person is already on the job in that role.',
+  },
+};
