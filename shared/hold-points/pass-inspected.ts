@@ -143,5 +143,5 @@ export const passInspected: PointDefinition = {
     ...judgeUndercut(context),
     ...judgeLeg(context),
   ],
-  beforeAct: (context, act, at) => (act === 'pass' ? judgeBeforePass(context, at) : []),
+  beforeAct: (context, act, at) => (act === 'pass' ? [...judgeBeforePass(context, at), ...judgeWelders(context)] : []),
 };
