@@ -2,6 +2,7 @@ import { clockIsDoubtful } from '../job/actor';
 import type { PointContext } from './context';
 import type { FieldDefinition } from './definition';
 import { commonPractice, judgeFact } from './judging';
+import { siteDay } from './site-day';
 import type { Verdict } from './verdict';
 
 /** Past its calibration date an instrument is a hold; a gas meter is a stop. Judged on the day it was used. */
@@ -17,7 +18,7 @@ const judgeCalibration = (context: PointContext, field: FieldDefinition): Verdic
     source: { kind: 'calibration', ref: instrument.serial },
     says: gas ? 'calibration-gas-meter' : 'calibration',
     params: { name: instrument.name, until: { instant: `${instrument.calibratedUntil}T00:00:00.000Z` } },
-    holds: reading.at.corrected.slice(0, 10) <= instrument.calibratedUntil,
+    holds: siteDay(context.state.plan.zone, reading.at.corrected) <= instrument.calibratedUntil,
   });
 };
 

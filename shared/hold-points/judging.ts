@@ -125,19 +125,3 @@ export const judgeCheck = (
     holds: value === undefined ? undefined : value === 'yes',
   });
 };
-
-/** First and second measurement, with a third that may settle it: the two that agree count. */
-export const agreeing = (
-  context: PointContext,
-  base: string,
-  within: number,
-): { value: number | undefined; spread: number | undefined; used: string[] } => {
-  const [first, second, third] = ['first', 'second', 'third'].map((name) => context.number(`${base}.${name}`));
-  if (first === undefined || second === undefined) return { value: undefined, spread: undefined, used: [] };
-  const pair = (a: number, b: number, used: string[]) => ({ value: (a + b) / 2, spread: Math.abs(a - b), used });
-  const own = pair(first, second, [`${base}.first`, `${base}.second`]);
-  if (third === undefined || own.spread <= within + slack) return own;
-  const others = [pair(first, third, [`${base}.first`, `${base}.third`]), pair(second, third, [`${base}.second`, `${base}.third`])];
-  const best = others.sort((a, b) => a.spread - b.spread)[0];
-  return best && best.spread < own.spread ? best : own;
-};

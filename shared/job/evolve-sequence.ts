@@ -46,8 +46,9 @@ const reopened = (state: JobState, event: JobEventOf<'point-reopened'>): JobStat
       superseded: [...one.superseded, evidenceOf(one)],
     };
   });
+  // before point 5 the head has to be lifted off again; at point 5 it sits where it was set
   const headPoint = points.findIndex((one) => one.place.kind === 'seal-greased-and-checked');
-  return { ...state, points, headSet: place <= headPoint ? false : state.headSet };
+  return { ...state, points, headSet: place < headPoint ? false : state.headSet };
 };
 
 /** The unreleased rest of the sequence is carried into the round's own points; what was released stays. */
