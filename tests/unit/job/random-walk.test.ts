@@ -1,0 +1,146 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { recordPoint, walkTo } from '../../../server/demo/scenario/walk-point';
+import { canonicalJson } from '../../../shared/ledger/canonical-json';
+import { foldEvents } from '../../../shared/job/evolve';
+import { handIsIn } from '../../../shared/job/decide-release';
+import { reviewPoint } from '../../../shared/job/review';
+import { concessionTotal } from '../../../shared/job/decide-failure';
+import { ownerOf } from '../../../shared/hold-points/points';
+import type { Role } from '../../../shared/permissions/roles';
+import { aJob, type TestJob } from '../../support/a-job';
+import { aPhoto } from '../../support/clearance';
+import { drive } from '../../support/drive';
+
+const roles: readonly Role[] = ['welder', 'company_rep', 'tool_pusher', 'coordinator'];
+
+/** One step of a careless crowd: anything that anybody could send at this moment, most of it out of turn. */
+const step = fc.record({
+  what: fc.constantFrom(
+    'good',
+    'record',
+    'photo',
+    'begin',
+    'end',
+    'present',
+    'withdraw',
+    'release',
+    'release',
+    'concede',
+    'send-back',
+    'reopen',
+    'repair',
+    'stop',
+    'resume',
+    'direction',
+    'seal',
+    'wait',
+  ),
+  who: fc.constantFrom(...roles),
+  where: fc.nat({ max: 40 }),
+  minutes: fc.integer({ min: 1, max: 80 }),
+});
+type Step = typeof step extends fc.Arbitrary<infer S> ? S : never;
+
+/** Sends one command, whether it fits or not; the rules must take it or refuse it, never break. */
+const take = async (job: TestJob, { what, who, where, minutes }: Step): Promise<void> => {
+  const points = job.job.points;
+  const current = points.find((point) => point.status === 'open' || point.status === 'presented');
+  // half of the steps go where the work is, half anywhere
+  const target = where % 2 === 0 && current ? current : points[where % points.length]!;
+  const point = target.place.id;
+  const actor = job.person(who);
+  const reason = 'Because it was so on site.';
+  const review = reviewPoint(job.job, target);
+  switch (what) {
+    case 'good':
+      if (current?.status === 'open' && !job.job.stopped) await recordPoint(drive(job), current.place.id).catch(() => undefined);
+      return;
+    case 'record':
+      job.try('record', { point, entries: [{ field: review.fields[where % review.fields.length]?.key ?? 'x', typed: '8', unit: 'in', measuredBy: null }] }, actor);
+      return;
+    case 'photo':
+      job.try('add-photo', { point, ...aPhoto(review.shots[0]?.key ?? 'x', where + 1) }, actor);
+      return;
+    case 'begin':
+      job.try('begin-act', { point, act: review.acts[0]?.key ?? 'x' }, actor);
+      return;
+    case 'end':
+      job.try('end-act', { point, act: review.acts[0]?.key ?? 'x' }, actor);
+      return;
+    case 'present':
+      job.try('present', { point, ...job.signing(point) }, actor);
+      return;
+    case 'withdraw':
+      job.try('withdraw', { point, reason: null }, actor);
+      return;
+    case 'release':
+      job.try('release', { point, ...job.signing(point), statements: [...review.statements] }, actor);
+      return;
+    case 'concede': {
+      const items = review.verdicts.slice(0, 3).map(({ limit, basis }) => ({ limit, basis, reason }));
+      if (items.length > 0) job.try('concede', { point, items: review.unconceded.length > 0 ? review.unconceded.map(({ limit, basis }) => ({ limit, basis, reason })) : items, ...job.signing(point) }, actor);
+      return;
+    }
+    case 'send-back':
+      job.try('send-back', { point, reason, contentHash: target.presentation?.contentHash ?? '0'.repeat(64) }, actor);
+      return;
+    case 'reopen':
+      job.try('reopen', { point, reason, ...job.signing(point) }, actor);
+      return;
+    case 'repair':
+      job.try('open-repair-round', { reason, passes: 1 }, actor);
+      return;
+    case 'stop':
+      job.try('stop-work', { reason }, actor);
+      return;
+    case 'resume':
+      job.try('resume-work', { note: reason, ...job.signingJob() }, actor);
+      return;
+    case 'direction':
+      job.try('name-direction', { direction: 'mud-tanks', words: null }, actor);
+      return;
+    case 'seal':
+      job.try('seal', { concessions: concessionTotal(job.job), ...job.signingJob() }, actor);
+      return;
+    case 'wait':
+      job.minutes(minutes);
+  }
+};
+
+/** What must be true of a job whatever was sent to it. */
+const holds = (job: TestJob): void => {
+  const live = job.job.points.filter((point) => point.carriedInto === null);
+  const firstUnreleased = live.findIndex((point) => point.status !== 'released');
+  live.forEach((point, index) => {
+    if (firstUnreleased >= 0 && index > firstUnreleased) expect(point.status, `${point.place.id} is ahead of its turn`).toBe('shut');
+  });
+  expect(live.filter((point) => point.status === 'open' || point.status === 'presented').length).toBeLessThanOrEqual(1);
+  for (const point of live.filter((one) => one.status === 'released')) {
+    expect(point.release?.by.role, 'released by its owner').toBe(ownerOf[point.place.kind]);
+    expect(handIsIn(reviewPoint(job.job, point), point, point.release!.by), 'released by another hand').toBe(false);
+    const outside = point.release!.judged.verdicts.filter((verdict) => verdict.outcome === 'outside');
+    expect(outside.filter((verdict) => verdict.kind === 'stop'), 'no stop was released').toEqual([]);
+    for (const hold of outside.filter((verdict) => verdict.kind === 'hold'))
+      expect(point.concessions.some((one) => one.limit === hold.limit), `${hold.limit} was conceded`).toBe(true);
+  }
+  if (job.job.status === 'sealed') expect(live.every((point) => point.status === 'released')).toBe(true);
+};
+
+describe('whatever is sent to a job', () => {
+  it('keeps order and ownership, and its events fold to the same job again', { timeout: 120_000 }, async () => {
+    const starts = ['hot-work-clearance', 'final-cut', 'valve-orientation', 'pass-1-inspected', 'cooled-to-touch'];
+    await fc.assert(
+      fc.asyncProperty(fc.constantFrom(...starts), fc.array(step, { minLength: 5, maxLength: 30 }), async (start, steps) => {
+        const job = aJob();
+        await walkTo(drive(job), start);
+        for (const one of steps) {
+          await take(job, one);
+          holds(job);
+        }
+        expect(canonicalJson(foldEvents(job.id, job.events))).toBe(canonicalJson(job.job));
+      }),
+      { numRuns: 40 },
+    );
+  });
+});
