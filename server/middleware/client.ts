@@ -17,7 +17,9 @@ export function client(folder: string): RequestHandler[] {
     },
   });
   const screen: RequestHandler = (req, res, next) => {
-    if (req.method !== 'GET' && req.method !== 'HEAD') throw new Problem(405, 'request.wrong-method');
+    if (req.method !== 'GET' && req.method !== 'HEAD') {
+      throw new Problem(405, 'request.wrong-method', { headers: { Allow: 'GET, HEAD' } });
+    }
     if (path.extname(req.path) !== '' || !req.accepts('html')) throw new Problem(404, 'request.unknown-route');
     res.set('Cache-Control', 'no-cache');
     res.sendFile(path.join(folder, 'index.html'), (error) => error && next(new Problem(404, 'request.unknown-route')));
