@@ -1,31 +1,19 @@
 import type { Command } from '../../shared/contracts/commands';
+import type { ResponseOf } from '../../shared/contracts/contract';
+import type { JobEvents, sendCommand as commandRoute, WireEvent } from '../../shared/contracts/jobs';
 import type { JobEvent } from '../../shared/job/events';
 import type { SigningSecrets } from './signing';
 import { ask } from './client';
 import type { Answer } from './problem';
 
-/** One link of a job's chain as it travels. `body` may come as the canonical text that was hashed. */
-export interface WireEvent {
-  seq: number;
-  type: string;
-  schema: number;
-  body: unknown;
-  hash: string;
-  prevHash: string;
-  commandId: string;
-}
-
-export interface CommandAnswer {
-  events: WireEvent[];
-  seq: number;
-  /** the same command had arrived before: this is its first answer again */
-  replayed: boolean;
-}
+export type { WireEvent };
+/** What the server made of a command; `replayed` when the same command had arrived before. */
+export type CommandAnswer = ResponseOf<typeof commandRoute>;
 
 const place = (jobId: string) => `/api/jobs/${encodeURIComponent(jobId)}`;
 
 /** The job's events after a sequence number. */
-export const readEvents = (jobId: string, after: number): Promise<Answer<{ events: WireEvent[] }>> =>
+export const readEvents = (jobId: string, after: number): Promise<Answer<JobEvents>> =>
   ask('GET', `${place(jobId)}/events`, { query: { after } });
 
 /** Sends a command; the secrets of a signature travel beside it. A wrong PIN is an answer and ends no session. */
@@ -44,4 +32,4 @@ export const fileAddress = (jobId: string, sha256: string): string => `${place(j
 
 /** An event as the rules read it. */
 export const asEvent = ({ type, schema, body }: WireEvent): JobEvent =>
-  ({ type, schema, body: typeof body === 'string' ? (JSON.parse(body) as unknown) : body }) as JobEvent;
+  ({ type, schema, body }) as unknown as JobEvent;

@@ -5,8 +5,9 @@ import { contentHashOf, jobContentHashOf } from '../../shared/job/content';
 import { decide } from '../../shared/job/decide';
 import type { JobActor } from '../../shared/job/decision';
 import { findPoint } from '../../shared/job/points';
-import { refusal, type Refusal } from '../../shared/job/refusal';
+import type { Refusal } from '../../shared/job/refusal';
 import type { JobState } from '../../shared/job/state';
+import type { Text } from '../../shared/locales/text';
 import { rolesOnJob } from '../../shared/permissions/can';
 import { commandGrants } from '../../shared/permissions/commands';
 import { sendCommand } from '../api/job';
@@ -24,8 +25,8 @@ import { useOutboxStore } from '../stores/outbox';
 import { usePreferencesStore } from '../stores/preferences';
 import { useSessionStore } from '../stores/session';
 
-/** What came of a signed command: done, refused by a rule, or not judged at all (no signal, wrong PIN). */
-export type Signed = { ok: true } | { ok: false; refusal: Refusal | null; problem: Problem | null };
+/** What came of a command: done (or in line), refused by a rule, or not judged at all (no signal, wrong PIN, no room). */
+export type Outcome = { ok: true } | { ok: false; refusal: Refusal | null; problem: Problem | null; says?: Text };
 
 /** A job that somebody works on: what it is, what this person may do with it, and the two ways to write. */
 export interface JobInHand {
@@ -40,10 +41,10 @@ export interface JobInHand {
   make<T extends CommandType>(type: T, body: CommandOf<T>['body']): CommandOf<T>;
   /** what the rules say to a command before anything is sent; null when they let it pass */
   judge(command: Command): Refusal | null;
-  /** decides here, then puts it in line with its files in front; null when it is on its way */
-  record(command: Command, files?: readonly { sha256: string; bytes: Blob }[]): Promise<Refusal | null>;
+  /** decides here, then puts it in line with its files in front */
+  record(command: Command, files?: readonly { sha256: string; bytes: Blob }[]): Promise<Outcome>;
   /** sends a signed command with its secrets beside it; needs the server */
-  sign(command: Command, secrets: SigningSecrets): Promise<Signed>;
+  sign(command: Command, secrets: SigningSecrets): Promise<Outcome>;
   /** hash of what is on the screen: of a point, or of the whole job */
   contentHash(point?: string): { contentHash: string; shown: Shown };
   refresh(): Promise<void>;
@@ -95,8 +96,8 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
     };
   }
 
-  async function sign(command: Command, secrets: SigningSecrets): Promise<Signed> {
-    if (!(await outbox.emptied(jobId.value))) return { ok: false, refusal: null, problem: { status: 0, code: 'unsent-first', more: {} } };
+  async function sign(command: Command, secrets: SigningSecrets): Promise<Outcome> {
+    if (!(await outbox.emptied(jobId.value))) return { ok: false, refusal: null, problem: null, says: { key: 'job.unsentFirst' } };
     const answer = await sendCommand(jobId.value, command, secrets);
     if (answer.ok) {
       jobs.take(jobId.value, answer.value.events);
@@ -123,14 +124,14 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
     judge,
     async record(command, files = []) {
       const refused = judge(command);
-      if (refused !== null) return refused;
+      if (refused !== null) return { ok: false, refusal: refused, problem: null };
       const inFront = files.map((file) => ({ kind: 'file' as const, body: file }));
       try {
         await outbox.put(jobId.value, [...inFront, { kind: 'command', body: command }]);
       } catch {
-        return { ...refusal('not-running'), code: 'not-understood', kind: 'blocked', text: { key: 'refusals.device-full' } };
+        return { ok: false, refusal: null, problem: null, says: { key: 'refusals.device-full' } };
       }
-      return null;
+      return { ok: true };
     },
     sign,
     contentHash,

@@ -38,7 +38,9 @@ export function makeSender(world: SenderWorld): Sender {
     do {
       again = false;
       const outcome: { left: boolean; waitS: number | null } = { left: false, waitS: null };
-      const mine = await world.alone(async () => Object.assign(outcome, await emptyLines(world)));
+      const mine = await world.alone(async () => {
+        Object.assign(outcome, await emptyLines(world));
+      });
       if (!outcome.left && mine) wait = FIRST_WAIT_MS;
       else plan(outcome.waitS);
     } while (again);

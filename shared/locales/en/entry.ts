@@ -1,8 +1,13 @@
-import app from './app';
+import calculations from './calculations';
+
+/** A number that cannot be read is explained in one place: the entry says the same. */
+const quantities = Object.fromEntries(
+  Object.entries(calculations).filter(([reason]) => reason.startsWith('quantity-')),
+);
 
 /** Why an answer was not understood, and how to type it. */
 export default {
-  ...app.quantity,
+  ...quantities,
   'answer-empty': 'Nothing is typed yet. Type or choose an answer.',
   'count-not-whole': 'This is counted in whole numbers. Type one like 12.',
   'check-yes-or-no': 'This is answered with yes or no.',

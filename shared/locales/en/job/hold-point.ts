@@ -1,5 +1,6 @@
 /** A hold point's page: capture, review and record. */
 export default {
+  pass: 'Pass {pass} inspected',
   round: '{title}, repair round {round}',
   owner: 'Released by the {role}.',
   ownerOf: {
@@ -64,6 +65,7 @@ export default {
   shut: 'This hold point is shut. Readings may be typed here already; they are recorded when it opens, and no work begins before.',
   shutFor: 'This hold point is shut. It opens when the one in front of it is released.',
   waitingFor: 'It waits for the {role}. Nothing changes until it is released, sent back or withdrawn.',
+  touchAt: 'By its cooling it reaches {touch} at {at}.',
   withdraw: 'Withdraw',
   withdrawWhy: 'The hold point is open again and you can record more.',
   drafted: 'drafted',

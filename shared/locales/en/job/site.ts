@@ -103,6 +103,7 @@ export default {
     hold: 'Hold time',
     drop: 'Allowed drop',
     used: 'used by a released point',
+    names: { datum: 'Datum', targetHeightIn: 'Target height', standOffIn: 'Stand-off', test: 'Pressure test' },
     outOfRange: 'Between {min} and {max}',
   },
   settings: {
