@@ -9,6 +9,7 @@ interface Row {
   well: string;
   zone: string;
   stopped: number;
+  strip: string;
   point: string;
   owner_role: Role;
   presented_at: Date;
@@ -28,7 +29,7 @@ const atMost = 200;
  */
 export async function listDesk({ dataSource }: AppDeps, actor: Actor): Promise<DeskEntry[]> {
   const rows = await dataSource.query<Row[]>(
-    `SELECT d.job_id, j.operator, j.rig, j.well, j.zone, j.stopped, d.point, d.owner_role, d.presented_at, d.presented_by,
+    `SELECT d.job_id, j.operator, j.rig, j.well, j.zone, j.stopped, j.strip, d.point, d.owner_role, d.presented_at, d.presented_by,
             d.hot, d.outside, d.unconceded,
             EXISTS (SELECT 1 FROM job_people_view o
                      WHERE o.job_id = d.job_id AND o.account_id = ? AND o.role IN (?) AND o.role = d.owner_role) AS owns
@@ -51,6 +52,7 @@ export async function listDesk({ dataSource }: AppDeps, actor: Actor): Promise<D
     ownerRole: row.owner_role,
     presentedAt: row.presented_at.toISOString(),
     presentedBy: row.presented_by,
+    strip: JSON.parse(row.strip) as DeskEntry['strip'],
     hot: Number(row.hot) === 1,
     stopped: Number(row.stopped) === 1,
     outside: Number(row.outside),

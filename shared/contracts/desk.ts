@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { roles } from '../permissions/roles';
 import { defineRoute } from './contract';
+import { jobSummarySchema } from './jobs';
 
 /** A presented hold point that waits for its owner. */
 export const deskEntrySchema = z.strictObject({
@@ -13,6 +14,8 @@ export const deskEntrySchema = z.strictObject({
   ownerRole: z.enum(roles),
   presentedAt: z.iso.datetime(),
   presentedBy: z.string(),
+  /** every hold point that counts, in order */
+  strip: jobSummarySchema.shape.strip,
   /** the joint is under heat */
   hot: z.boolean(),
   stopped: z.boolean(),

@@ -1,6 +1,7 @@
 import type { RouteLocationNormalized, RouteLocationRaw } from 'vue-router';
 import { can } from '../../shared/permissions/can';
 import { useSessionStore } from '../stores/session';
+import { firstPage } from './first-page';
 import { landingFor } from './landing';
 
 /** Lets through who may pass; sends others to sign-in, keeping what they wanted, or to the place of their role. */
@@ -8,7 +9,7 @@ export async function guard(to: RouteLocationNormalized): Promise<true | RouteLo
   const session = useSessionStore();
   await session.known();
   const actor = session.actor;
-  if (to.name === 'sign-in') return actor === undefined ? true : landingFor(actor.roles);
+  if (to.name === 'sign-in') return actor === undefined ? true : await firstPage();
   if (to.meta.public === true) return true;
   if (actor === undefined) {
     return to.fullPath === '/jobs' ? { name: 'sign-in' } : { name: 'sign-in', query: { to: to.fullPath } };

@@ -45,6 +45,7 @@ export const useSessionStore = defineStore('session', () => {
     me.value = undefined;
     asked = Promise.resolve();
     letGo('me');
+    letGo('job-list');
   }
 
   /** Asks once who is signed in; without a signal it is the person kept on this device. */

@@ -8,9 +8,13 @@ import photos from './photos';
 import drawing from './drawing';
 import entry from './entry';
 import job from './job';
+import jobs from './jobs';
 import limits from './limits';
+import plan from './plan';
+import planFaults from './plan-faults';
 import points from './points';
 import refusals from './refusals';
+import settings from './settings';
 import signature from './signature';
 
 /** English, area by area: one import and one line for each, in the order of the alphabet. */
@@ -23,8 +27,12 @@ export default {
   drawing,
   entry,
   job,
+  jobs,
   limits,
+  plan,
+  planFaults,
   points,
   refusals,
+  settings,
   signature,
 };

@@ -1,0 +1,28 @@
+/** The list of planned and running jobs. */
+export default {
+  title: 'Jobs',
+  new: 'New job',
+  of: '{rig}, {operator}',
+  pipe: '{casing}. Head {head}',
+  waits: 'Waits for the {role}, {since}',
+  waitsYou: 'Waits for you, {since}',
+  allReleased: 'Every hold point is released. Ready to seal.',
+  ended: 'Finished',
+  hot: 'Hot joint',
+  stopped: 'Work stopped',
+  concessions: { one: '1 concession', other: '{count} concessions' },
+  reopenings: { one: '1 reopened', other: '{count} reopened' },
+  since: {
+    minutes: '{minutes}\u00a0min',
+    hours: '{hours}\u00a0h {minutes}\u00a0min',
+    days: '{days}\u00a0d {hours}\u00a0h',
+  },
+  refresh: 'Refresh',
+  more: 'Show older ones',
+  loading: 'The jobs are being loaded.',
+  asOf: 'As read {at}',
+  empty: 'No job is planned or running.',
+  emptyWelder: 'When the office puts you on a job it appears here. Sealed jobs are under Packets.',
+  emptyCoordinator: 'Plan one: operator, well, casing, head, procedure and test terms.',
+  emptyGuest: 'When you are put on a job it appears here. Sealed jobs are under Packets.',
+};
