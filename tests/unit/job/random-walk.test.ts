@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { recordPoint, walkTo } from '../../../server/demo/scenario/walk-point';
+import { recordPoint, walkTo } from '../../support/drive';
 import { canonicalJson } from '../../../shared/ledger/canonical-json';
 import { foldEvents } from '../../../shared/job/evolve';
 import { handIsIn } from '../../../shared/job/decide-release';
@@ -10,7 +10,6 @@ import { ownerOf } from '../../../shared/hold-points/points';
 import type { Role } from '../../../shared/permissions/roles';
 import { aJob, type TestJob } from '../../support/a-job';
 import { aPhoto } from '../../support/clearance';
-import { drive } from '../../support/drive';
 
 const roles: readonly Role[] = ['welder', 'company_rep', 'tool_pusher', 'coordinator'];
 
@@ -42,6 +41,15 @@ const step = fc.record({
 });
 type Step = typeof step extends fc.Arbitrary<infer S> ? S : never;
 
+/** The good way may be shut by what was sent before: then this step does nothing. */
+const tryTo = (go: () => void): void => {
+  try {
+    go();
+  } catch (error) {
+    if (!(error instanceof Error) || !/was refused|never became complete/.test(error.message)) throw error;
+  }
+};
+
 /** Sends one command, whether it fits or not; the rules must take it or refuse it, never break. */
 const take = async (job: TestJob, { what, who, where, minutes }: Step): Promise<void> => {
   const points = job.job.points;
@@ -54,7 +62,7 @@ const take = async (job: TestJob, { what, who, where, minutes }: Step): Promise<
   const review = reviewPoint(job.job, target);
   switch (what) {
     case 'good':
-      if (current?.status === 'open' && !job.job.stopped) await recordPoint(drive(job), current.place.id).catch(() => undefined);
+      if (current?.status === 'open' && !job.job.stopped) tryTo(() => recordPoint(job, current.place.id));
       return;
     case 'record':
       job.try('record', { point, entries: [{ field: review.fields[where % review.fields.length]?.key ?? 'x', typed: '8', unit: 'in', measuredBy: null }] }, actor);
@@ -130,12 +138,12 @@ const holds = (job: TestJob): void => {
 describe('whatever is sent to a job', () => {
   it('keeps order and ownership, and its events fold to the same job again', { timeout: 120_000 }, async () => {
     const starts = ['hot-work-clearance', 'final-cut', 'valve-orientation', 'pass-1-inspected', 'cooled-to-touch'];
-    await fc.assert(
+    fc.assert(
       fc.asyncProperty(fc.constantFrom(...starts), fc.array(step, { minLength: 5, maxLength: 30 }), async (start, steps) => {
         const job = aJob();
-        await walkTo(drive(job), start);
+        walkTo(job, start);
         for (const one of steps) {
-          await take(job, one);
+          take(job, one);
           holds(job);
         }
         expect(canonicalJson(foldEvents(job.id, job.events))).toBe(canonicalJson(job.job));
