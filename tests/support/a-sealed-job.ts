@@ -1,4 +1,3 @@
-import { presentPoint, recordPoint, releasePoint, walkPoint, walkTo } from '../../server/demo/scenario/walk-point';
 import { sitePoint } from '../../shared/hold-points/site';
 import { concessionTotal } from '../../shared/job/decide-failure';
 import { currentPoint } from '../../shared/job/points';
@@ -6,8 +5,8 @@ import { reviewPoint } from '../../shared/job/review';
 import { chainStart, makeLink, type ChainLink } from '../../shared/ledger/chain';
 import { aJob, hash, type TestJob } from './a-job';
 import { aPlan } from './a-plan';
-import { cleanAir } from './clearance';
-import { drive } from './drive';
+import { aPhoto, cleanAir } from './clearance';
+import { presentPoint, recordPoint, releasePoint, walkPoint, walkTo } from './drive';
 
 const [clearance, cut, seal, valve, test] = [
   'hot-work-clearance',
@@ -25,17 +24,15 @@ const sentBack = (job: TestJob, point: string, reason: string): void => {
 };
 
 /** Point 1 with a photo that has to be taken again. */
-const clear = async (job: TestJob): Promise<void> => {
-  const driver = drive(job);
-  await recordPoint(driver, clearance);
-  await presentPoint(driver, clearance);
+const clear = (job: TestJob): void => {
+  recordPoint(job, clearance);
+  presentPoint(job, clearance);
   sentBack(job, clearance, 'The display cannot be read in the photo. Take it again, closer.');
   const photo = job.point(clearance).photos[0]?.id ?? '';
   job.do('set-photo-aside', { point: clearance, photo, reason: 'The display is blurred.' }, job.person('welder'));
-  const again = await driver.photograph(clearance, 'second look');
-  job.minutes(1).do('add-photo', { point: clearance, shot: 'meter-at-cellar', ...again }, job.person('welder'));
-  await presentPoint(driver, clearance);
-  await releasePoint(driver, clearance);
+  job.minutes(1).do('add-photo', { point: clearance, ...aPhoto('meter-at-cellar', 99) }, job.person('welder'));
+  presentPoint(job, clearance);
+  releasePoint(job, clearance);
 };
 
 const stoppedAndResumed = (job: TestJob): void => {
@@ -46,12 +43,11 @@ const stoppedAndResumed = (job: TestJob): void => {
 };
 
 /** Measured low and uneven, measured once more at 6 o'clock, presented as it is and conceded with two reasons. */
-const cutLow = async (job: TestJob): Promise<void> => {
-  const driver = drive(job);
-  await recordPoint(driver, cut, { 'cut.12': '8 1/16', 'cut.3': '8 1/8', 'cut.6': '8 1/4', 'cut.9': '8 1/16' });
-  const again = [{ field: 'cut.6', typed: '8 3/16', unit: 'in', measuredBy: null }];
+const cutLow = (job: TestJob): void => {
+  recordPoint(job, cut, { 'cut.12': '32 1/16', 'cut.3': '32 1/8', 'cut.6': '32 1/4', 'cut.9': '32 1/16' });
+  const again = [{ field: 'cut.6', typed: '32 3/16', unit: 'in', measuredBy: null }];
   job.do('record', { point: cut, entries: again }, job.person('welder', 1));
-  await presentPoint(driver, cut);
+  presentPoint(job, cut);
   const reasons: Record<string, string> = {
     'cut-low': 'The stack has room for 7/64 in. Nothing more is cut.',
     'cut-spread': 'The bevel takes the spread; the seal sits well above it.',
@@ -62,16 +58,16 @@ const cutLow = async (job: TestJob): Promise<void> => {
     reason: reasons[limit] ?? '',
   }));
   job.do('concede', { point: cut, items, ...job.signing(cut) }, job.person('company_rep'));
-  await releasePoint(driver, cut);
+  releasePoint(job, cut);
 };
 
-const lookedAtAgain = async (job: TestJob): Promise<void> => {
-  await recordPoint(drive(job), valve);
+const lookedAtAgain = (job: TestJob): void => {
+  recordPoint(job, valve);
   const reason = 'The lip was seen on one side only. Look all the way round.';
   job.do('reopen', { point: seal, reason, ...job.signing(seal) }, job.person('company_rep'));
   const entries = [{ field: 'seal.condition', typed: 'seen all the way round, mirror', unit: null, measuredBy: null }];
   job.minutes(9).do('record', { point: seal, entries }, job.person('welder'));
-  await walkPoint(drive(job), seal);
+  walkPoint(job, seal);
 };
 
 /** Typed before presenting, arrived after the release: kept, flagged, and it counts for nothing. */
@@ -85,15 +81,17 @@ const lateReading = (job: TestJob, point: string): void => {
 
 const termsChanged = (job: TestJob): void => {
   const { terms } = job.job.plan;
-  const gauge = { gaugeLowPct: { value: '30', source: 'job' as const }, gaugeHighPct: { value: '70', source: 'job' as const } };
+  const gauge = {
+    gaugeLowPct: { value: '30', source: 'job' as const },
+    gaugeHighPct: { value: '70', source: 'job' as const },
+  };
   const reason = 'The programme asks for 30 to 70 % of full scale.';
   const changed = { ...terms, settings: { ...terms.settings, ...gauge } };
   job.minutes(1).do('change-terms', { terms: changed, reason, ...job.signingJob() }, job.person('company_rep'));
 };
 
-const failedTest = async (job: TestJob): Promise<void> => {
-  const driver = drive(job);
-  await recordPoint(driver, test, { 'hold-readings.3.pressure': '1390' });
+const failedTest = (job: TestJob): void => {
+  recordPoint(job, test, { 'hold-readings.3.pressure': '1390' });
   const reason = 'Lost 110 psi in ten minutes; the weld weeps at 4 o’clock.';
   job.do('open-repair-round', { reason, passes: 1 }, job.person('company_rep'));
 };
@@ -102,34 +100,33 @@ const failedTest = async (job: TestJob): Promise<void> => {
  * A whole job of the invented scenario: sent back, stopped, conceded, reopened, terms changed, a late reading, a
  * handover, a failed test with its repair round, and the seal.
  */
-export const aSealedJob = async (): Promise<TestJob> => {
+export const aSealedJob = (): TestJob => {
   const job = aJob(aPlan({ proposedDirection: 'mud-tanks' }));
-  const driver = drive(job);
   job.minutes(35);
-  await clear(job);
-  await walkTo(driver, cut);
+  clear(job);
+  walkTo(job, cut);
   stoppedAndResumed(job);
-  await cutLow(job);
-  await walkTo(driver, valve);
-  await lookedAtAgain(job);
-  await walkPoint(driver, valve);
+  cutLow(job);
+  walkTo(job, valve);
+  lookedAtAgain(job);
+  walkPoint(job, valve);
   lateReading(job, valve);
   termsChanged(job);
-  await walkTo(driver, 'pass-1-inspected');
+  walkTo(job, 'pass-1-inspected');
   const line = 'Root goes next. Joint at 310 °F, rods out of the oven at each pass, the plug lies in tray 2.';
   job.minutes(1).do('hand-over', { line, to: 'J. Ostrom' }, job.person('welder'));
-  await walkTo(driver, test);
-  await failedTest(job);
-  await walkTo(driver, null);
+  walkTo(job, test);
+  failedTest(job);
+  walkTo(job, null);
   if (open(job) !== '') throw new Error(`the scenario stuck at ${open(job)}`);
   const concessions = concessionTotal(job.job);
   return job.minutes(6).do('seal', { concessions, ...job.signingJob() }, job.person('company_rep'));
 };
 
 /** A job that ended early: called off at its second point. */
-export const aCalledOffJob = async (): Promise<TestJob> => {
+export const aCalledOffJob = (): TestJob => {
   const job = aJob();
-  await walkTo(drive(job), 'height-takeoff');
+  walkTo(job, 'height-takeoff');
   const reason = 'The cement did not hold; the rig skids to the next well.';
   return job.minutes(30).do('call-off', { reason, ...job.signingJob() }, job.person('company_rep'));
 };
