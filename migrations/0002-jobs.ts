@@ -18,7 +18,7 @@ const tables = [
     prev_hash char(64) NOT NULL,
     hash char(64) NOT NULL,
     PRIMARY KEY (job_id, seq),
-    CONSTRAINT job_events_head FOREIGN KEY (job_id) REFERENCES job_heads (job_id)
+    CONSTRAINT job_events_head FOREIGN KEY (job_id) REFERENCES job_heads (job_id) ON DELETE NO ACTION ON UPDATE NO ACTION
   ) ENGINE=InnoDB`,
   `CREATE TABLE command_receipts (
     command_id char(36) NOT NULL,

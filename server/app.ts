@@ -1,3 +1,4 @@
+import compression from 'compression';
 import express from 'express';
 import type { Express } from 'express';
 import { client } from './middleware/client';
@@ -18,6 +19,7 @@ export function createApp(deps: AppDeps): Express {
   app.set('trust proxy', deps.config.trustProxy);
   app.set('etag', false);
   app.use(requestLog(deps.log, deps.ids), ...securityHeaders(deps.config), sameOrigin(deps.config));
+  app.use(compression());
   app.use('/api', ...jsonBody(), ...sessions(deps));
   app.use(...apiRoutes(deps));
   app.use('/api', unknownRoute);
