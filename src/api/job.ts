@@ -17,7 +17,11 @@ export const readEvents = (jobId: string, after: number): Promise<Answer<JobEven
   ask('GET', `${place(jobId)}/events`, { query: { after } });
 
 /** Sends a command; the secrets of a signature travel beside it. A wrong PIN is an answer and ends no session. */
-export const sendCommand = (jobId: string, command: Command, signing?: SigningSecrets): Promise<Answer<CommandAnswer>> =>
+export const sendCommand = (
+  jobId: string,
+  command: Command,
+  signing?: SigningSecrets,
+): Promise<Answer<CommandAnswer>> =>
   ask('POST', `${place(jobId)}/commands`, {
     body: signing === undefined ? { command } : { command, signing },
     expects401: signing !== undefined,
@@ -31,5 +35,4 @@ export const sendFile = (jobId: string, sha256: string, bytes: Blob): Promise<An
 export const fileAddress = (jobId: string, sha256: string): string => `${place(jobId)}/files/${sha256}`;
 
 /** An event as the rules read it. */
-export const asEvent = ({ type, schema, body }: WireEvent): JobEvent =>
-  ({ type, schema, body }) as unknown as JobEvent;
+export const asEvent = ({ type, schema, body }: WireEvent): JobEvent => ({ type, schema, body }) as unknown as JobEvent;

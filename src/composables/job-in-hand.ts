@@ -1,4 +1,14 @@
-import { computed, inject, onScopeDispose, provide, toValue, watch, type ComputedRef, type InjectionKey, type MaybeRefOrGetter } from 'vue';
+import {
+  computed,
+  inject,
+  onScopeDispose,
+  provide,
+  toValue,
+  watch,
+  type ComputedRef,
+  type InjectionKey,
+  type MaybeRefOrGetter,
+} from 'vue';
 import { v7 } from 'uuid';
 import type { Command, CommandOf, CommandType, Shown } from '../../shared/contracts/commands';
 import { contentHashOf, jobContentHashOf } from '../../shared/job/content';
@@ -97,7 +107,8 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
   }
 
   async function sign(command: Command, secrets: SigningSecrets): Promise<Outcome> {
-    if (!(await outbox.emptied(jobId.value))) return { ok: false, refusal: null, problem: null, says: { key: 'job.unsentFirst' } };
+    if (!(await outbox.emptied(jobId.value)))
+      return { ok: false, refusal: null, problem: null, says: { key: 'job.unsentFirst' } };
     const answer = await sendCommand(jobId.value, command, secrets);
     if (answer.ok) {
       jobs.take(jobId.value, answer.value.events);
@@ -120,7 +131,13 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
     refused: computed(() => mine.value.filter((entry) => entry.state === 'refused')),
     may: (type) => commandGrants[type].some((role) => actor.value.roles.includes(role)) && state.value?.ended === null,
     make: <T extends CommandType>(type: T, body: CommandOf<T>['body']) =>
-      ({ id: v7(), type, basedOn: known.value.events.length || null, clock: { ...clock.stamp() }, body }) as unknown as CommandOf<T>,
+      ({
+        id: v7(),
+        type,
+        basedOn: known.value.events.length || null,
+        clock: { ...clock.stamp() },
+        body,
+      }) as unknown as CommandOf<T>,
     judge,
     async record(command, files = []) {
       const refused = judge(command);
@@ -143,7 +160,10 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
   }
   document.addEventListener('visibilitychange', look);
   onScopeDispose(() => document.removeEventListener('visibilitychange', look));
-  watch(() => connection.reached, (reached) => reached && look());
+  watch(
+    () => connection.reached,
+    (reached) => reached && look(),
+  );
   watch(jobId, (one) => void jobs.open(one), { immediate: true });
   provide(inHand, hand);
   return hand;

@@ -14,7 +14,12 @@ export async function draftOf(accountId: string, jobId: string, point: string): 
 }
 
 /** Puts one answer into the draft, in place of an earlier one for the same field. */
-export async function draft(accountId: string, jobId: string, point: string, entry: RecordEntry): Promise<RecordEntry[]> {
+export async function draft(
+  accountId: string,
+  jobId: string,
+  point: string,
+  entry: RecordEntry,
+): Promise<RecordEntry[]> {
   const write = (await database()).transaction('drafts', 'readwrite', { durability: 'strict' });
   const before = (await write.store.get([accountId, jobId, point]))?.entries ?? [];
   const entries = [...before.filter((one) => one.field !== entry.field), entry];

@@ -10,9 +10,15 @@ import type { OutboxEntry } from './outbox-entry';
  * The job as it will stand once everything in line has arrived: the same rules on the same commands give the same
  * events, so that verdicts and progress show at once and without a signal. A command that a rule refuses is left out.
  */
-export const expectedState = (confirmed: JobState, entries: readonly OutboxEntry[], actorIn: (state: JobState) => JobActor): JobState =>
+export const expectedState = (
+  confirmed: JobState,
+  entries: readonly OutboxEntry[],
+  actorIn: (state: JobState) => JobActor,
+): JobState =>
   entries.reduce((state, entry) => {
     if (entry.kind !== 'command' || entry.state !== 'waiting') return state;
     const decision = decide(state, entry.body, actorIn(state), timesOf(entry.body.clock), hashText);
-    return decision.ok ? decision.events.reduce<JobState>((next, event) => evolve(state.id, next, event), state) : state;
+    return decision.ok
+      ? decision.events.reduce<JobState>((next, event) => evolve(state.id, next, event), state)
+      : state;
   }, confirmed);

@@ -37,7 +37,10 @@ export const useJobsStore = defineStore('jobs', () => {
     const fresh = events.filter((one) => one.seq > before.events.length).sort((a, b) => a.seq - b.seq);
     if (fresh.length === 0) return true;
     if (fresh[0]?.seq !== before.events.length + 1) return false;
-    const confirmed = fresh.reduce<JobState | null>((state, one) => evolve(jobId, state, asEvent(one)), before.confirmed);
+    const confirmed = fresh.reduce<JobState | null>(
+      (state, one) => evolve(jobId, state, asEvent(one)),
+      before.confirmed,
+    );
     const all = [...before.events, ...fresh];
     change(jobId, { events: all, confirmed });
     if (session.me !== undefined) void cacheEvents(session.me.id, jobId, all);
@@ -61,7 +64,8 @@ export const useJobsStore = defineStore('jobs', () => {
 
   async function load(jobId: string): Promise<void> {
     change(jobId, { loading: true });
-    if (of(jobId).events.length === 0 && session.me !== undefined) merge(jobId, await cachedEvents(session.me.id, jobId));
+    if (of(jobId).events.length === 0 && session.me !== undefined)
+      merge(jobId, await cachedEvents(session.me.id, jobId));
     const answer = await readEvents(jobId, of(jobId).events.length);
     if (answer.ok) merge(jobId, answer.value.events);
     change(jobId, { loading: false, problem: answer.ok ? null : answer.problem });

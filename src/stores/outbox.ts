@@ -73,7 +73,10 @@ export const useOutboxStore = defineStore('outbox', () => {
   /** Tries a refused command again as a new one, in its old place in the line. */
   async function tryAgain(entry: OutboxEntry, command?: Command): Promise<void> {
     const item: OutboxItem = command === undefined ? entry : { kind: 'command', body: command };
-    await outboxShelf.replace(entry.place, item.kind === 'command' ? { kind: item.kind, body: item.body } : { kind: item.kind, body: item.body });
+    await outboxShelf.replace(
+      entry.place,
+      item.kind === 'command' ? { kind: item.kind, body: item.body } : { kind: item.kind, body: item.body },
+    );
     await read();
     void sender.kick();
   }

@@ -4,7 +4,8 @@ export default {
   'not-running': 'This job is finished; nothing can be added to it any more.',
   'no-such-point': 'The job has no such hold point. Go back to the job and choose one from its list.',
   'point-shut': 'This hold point is still shut. It opens when the one in front of it is released.',
-  'point-not-open': 'This hold point is not open. Withdraw it, or have it sent back or reopened, before anything changes.',
+  'point-not-open':
+    'This hold point is not open. Withdraw it, or have it sent back or reopened, before anything changes.',
   'point-presented': 'This hold point is presented and waits for its release. Withdraw it first to record more.',
   'point-not-presented': 'This hold point is not presented any more. Look at where it stands now.',
   'point-already-released': 'This hold point is released already. Only the company representative can reopen it.',
@@ -22,7 +23,8 @@ export default {
   'act-not-running': 'This is not running, so it cannot be ended.',
   'not-complete': 'Not everything is there yet. What is missing is listed below.',
   'outside-stop': 'Something is outside a limit that nobody can concede. Put it right and measure again.',
-  'outside-hold': 'Something is outside its limit. The company representative concedes it with a reason first, or it is sent back.',
+  'outside-hold':
+    'Something is outside its limit. The company representative concedes it with a reason first, or it is sent back.',
   'statements-missing': 'Every statement must be made before this can be released.',
   'own-evidence': 'You recorded or measured some of this evidence, so somebody else must release or concede it.',
   'not-the-owner': 'This hold point is released by somebody else.',
@@ -30,20 +32,25 @@ export default {
   'cannot-concede-stop': 'This limit guards life, or something that cannot be put back. Nobody can concede it.',
   'nothing-to-concede': 'Nothing stands outside at this limit any more ({limit}). Look at the readings again.',
   'verdict-moved': 'The reading behind this has changed since it was shown. Look at it again before you concede.',
-  'no-round-here': 'A repair round is opened from the cold look or the pressure test. Before them a hold point is reopened.',
+  'no-round-here':
+    'A repair round is opened from the cold look or the pressure test. Before them a hold point is reopened.',
   'round-under-way': 'A repair round is under way already.',
-  'head-already-set': 'The head has been lifted over the seal. Turning it now would roll the seal, so the direction stands.',
-  'head-never-set': 'The head has never been set, so there is none to set again. Reopen the hold point that has to change.',
+  'head-already-set':
+    'The head has been lifted over the seal. Turning it now would roll the seal, so the direction stands.',
+  'head-never-set':
+    'The head has never been set, so there is none to set again. Reopen the hold point that has to change.',
   'work-stopped': 'Work is stopped. The company representative resumes it before anything goes on.',
   'work-not-stopped': 'Work is not stopped, so there is nothing to resume.',
   'not-ready-to-resume': 'Work cannot be resumed yet. What stands in the way is listed below.',
   'terms-in-use': 'A released hold point was judged by these terms. Reopen that hold point before they change.',
-  'terms-need-signature': 'Hold points have been released by these terms, so only the company representative changes them now.',
+  'terms-need-signature':
+    'Hold points have been released by these terms, so only the company representative changes them now.',
   'person-not-on-job': 'This person does not hold that role on the job.',
   'role-already-held': '{name} holds this role on the job already.',
   'last-of-role': 'The job needs somebody in this role. Put another person on before this one leaves.',
   'not-all-released': 'Not every hold point is released yet, so the job cannot be sealed.',
   'concessions-miscounted': 'The job carries {total} concessions, another number than was read back. Read them again.',
   'plan-not-workable': 'This cannot work as planned. {why}',
-  'device-full': 'This device could not keep it: its storage is full or barred. Free some space and try again; what was typed is still here.',
+  'device-full':
+    'This device could not keep it: its storage is full or barred. Free some space and try again; what was typed is still here.',
 };

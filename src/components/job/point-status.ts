@@ -5,6 +5,8 @@ import type { PointStatus } from '../app/chips';
 export const shownStatus = (point: PointState): PointStatus => {
   const back = point.sentBack.at(-1);
   const isBack =
-    point.status === 'open' && back !== undefined && (point.openedAt === null || back.at.corrected >= point.openedAt.corrected);
+    point.status === 'open' &&
+    back !== undefined &&
+    (point.openedAt === null || back.at.corrected >= point.openedAt.corrected);
   return isBack && point.presentation === null ? 'sent-back' : point.status;
 };

@@ -21,7 +21,8 @@ export default {
   computed: 'Worked out',
   outside: 'Outside the limits',
   outsideCount: { one: '1 reading is outside its limit', other: '{count} readings are outside their limits' },
-  mustConcede: 'It may be presented as it is; the company representative must concede it, with a reason, before it is released.',
+  mustConcede:
+    'It may be presented as it is; the company representative must concede it, with a reason, before it is released.',
   stops: 'Cannot be presented while this stands',
   by: 'by {name}',
   measuredTyped: 'measured by {measured}, typed by {typed}',
@@ -69,7 +70,10 @@ export default {
   withdraw: 'Withdraw',
   withdrawWhy: 'The hold point is open again and you can record more.',
   drafted: 'drafted',
-  draftReady: { one: '1 reading was typed here before this point opened.', other: '{count} readings were typed here before this point opened.' },
+  draftReady: {
+    one: '1 reading was typed here before this point opened.',
+    other: '{count} readings were typed here before this point opened.',
+  },
   recordDrafts: 'Record what was drafted',
   dropDrafts: 'Drop the drafts',
   act: {
@@ -134,10 +138,12 @@ export default {
     concedeByRep: 'The company representative has to concede what is outside before you can release.',
     statementsFirst: 'Make every statement above, then release.',
     reopen: 'Reopen',
-    reopenWhy: 'Its release and concessions no longer count, and every point after it is shut with its evidence kept as superseded.',
+    reopenWhy:
+      'Its release and concessions no longer count, and every point after it is shut with its evidence kept as superseded.',
     reason: 'Reason',
     signing: 'You sign as {name}, {role}.',
-    offline: 'There is no signal. Releasing, conceding and sealing need the server; nothing is lost, try again with a signal.',
+    offline:
+      'There is no signal. Releasing, conceding and sealing need the server; nothing is lost, try again with a signal.',
     named: 'You named',
     namedBy: 'Direction named by {name}',
     notNamed: 'The direction is not named yet',

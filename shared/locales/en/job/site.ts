@@ -104,6 +104,7 @@ export default {
     drop: 'Allowed drop',
     used: 'used by a released point',
     names: { datum: 'Datum', targetHeightIn: 'Target height', standOffIn: 'Stand-off', test: 'Pressure test' },
+    mend: 'A value is outside what a programme may set. Mend it first.',
     outOfRange: 'Between {min} and {max}',
   },
   settings: {
@@ -128,11 +129,13 @@ export default {
   },
   failure: {
     round: 'Open a repair round',
-    roundWhy: 'From the cold look or the test: bleed, drain, plug out, excavate, look for cracks, preheat, weld, cool, and the whole test again. What was released stays on record.',
+    roundWhy:
+      'From the cold look or the test: bleed, drain, plug out, excavate, look for cracks, preheat, weld, cool, and the whole test again. What was released stays on record.',
     roundReason: 'What failed, and where',
     roundPasses: 'Repair passes',
     setAgain: 'Set the head again',
-    setAgainWhy: 'The head is cut off. The job goes back to point 1 with a new height and head; everything so far stays in the packet as the setting before.',
+    setAgainWhy:
+      'The head is cut off. The job goes back to point 1 with a new height and head; everything so far stays in the packet as the setting before.',
     setAgainReason: 'Why the head comes off',
     height: 'New target height above ground',
     headId: 'Head drawing',
