@@ -6,7 +6,7 @@ describe('canonical JSON', () => {
   // RFC 8785, section 3.2.2 and 3.2.3: the worked example with numbers, escapes and key order
   it('prints the worked example of RFC 8785 3.2.2', () => {
     const input = {
-      numbers: [333333333.33333329, 1e30, 4.5, 2e-3, 0.000000000000000000000000001],
+      numbers: [Number('333333333.33333329'), 1e30, 4.5, 2e-3, 0.000000000000000000000000001],
       string: '\u20ac$\u000F\u000aA\'\u0042\u0022\u005c\\"/',
       literals: [null, true, false],
     };
