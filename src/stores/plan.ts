@@ -43,8 +43,11 @@ export const usePlanStore = defineStore('plan', () => {
   let open: Planning | undefined;
 
   const day = computed(() => dayIn(draft.value.zone, clock.correctedNow()));
-  const read = computed(() => (catalogue.value === undefined ? undefined : readDraft(draft.value, catalogue.value, day.value)));
+  const read = computed(() =>
+    catalogue.value === undefined ? undefined : readDraft(draft.value, catalogue.value, day.value),
+  );
   const faults = computed<readonly FormFault[]>(() => read.value?.faults ?? []);
+  const hasSeal = computed(() => (catalogue.value?.heads.find((one) => one.id === draft.value.headId)?.seals ?? 0) > 0);
   /** what keeps the job from being planned */
   const stops = computed(() => faults.value.filter(({ kind }) => kind !== 'hold' && kind !== 'advice'));
   const warnings = computed(() => faults.value.filter(({ kind }) => kind === 'hold' || kind === 'advice'));
@@ -57,7 +60,8 @@ export const usePlanStore = defineStore('plan', () => {
   async function begin(): Promise<void> {
     if (owner !== session.me?.id) {
       owner = session.me?.id;
-      draft.value = (owner === undefined ? undefined : keptObject(place(owner), isDraft)) ?? blankDraft(preferences.units);
+      draft.value =
+        (owner === undefined ? undefined : keptObject(place(owner), isDraft)) ?? blankDraft(preferences.units);
       tried.value = false;
       open = undefined;
     }
@@ -99,5 +103,23 @@ export const usePlanStore = defineStore('plan', () => {
     return undefined;
   }
 
-  return { catalogue, draft, read, faults, stops, warnings, at, problem, refusal, loading, sending, tried, begin, drop, plan };
+  return {
+    catalogue,
+    draft,
+    day,
+    read,
+    faults,
+    hasSeal,
+    stops,
+    warnings,
+    at,
+    problem,
+    refusal,
+    loading,
+    sending,
+    tried,
+    begin,
+    drop,
+    plan,
+  };
 });

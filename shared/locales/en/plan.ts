@@ -159,7 +159,10 @@ export default {
     name: 'Limit',
     usual: 'Common practice',
     own: 'Operator’s programme',
-    show: { one: 'Show all limits, 1 of them the programme’s', other: 'Show all limits, {count} of them the programme’s' },
+    show: {
+      one: 'Show all limits, 1 of them the programme’s',
+      other: 'Show all limits, {count} of them the programme’s',
+    },
     inForceOwn: 'the programme’s',
     inForceUsual: 'common practice',
   },

@@ -69,7 +69,8 @@ export function readOwnCasing(own: OwnCasing, system: UnitSystem): OwnCasingRead
   const [odIn, wallIn, weight] = [numberOf(fields.odIn), numberOf(fields.wallIn), numberOf(fields.weightLbFt)];
   const worked = workOut(odIn, wallIn, own.grade);
   const collapsePsi = fields.collapsePsi.is === 'blank' ? worked?.collapsePsi : numberOf(fields.collapsePsi);
-  const yieldPsi = fields.internalYieldPsi.is === 'blank' ? worked?.internalYieldPsi : numberOf(fields.internalYieldPsi);
+  const yieldPsi =
+    fields.internalYieldPsi.is === 'blank' ? worked?.internalYieldPsi : numberOf(fields.internalYieldPsi);
   const bore = odIn === null || wallIn === null ? null : drift({ odIn, wallIn });
   const typedRatings = fields.collapsePsi.is === 'read' || fields.internalYieldPsi.is === 'read';
   const source = own.source.trim() || (typedRatings || worked === null ? '' : casingCollapseInfo.source);

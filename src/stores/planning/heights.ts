@@ -10,7 +10,10 @@ export interface PlannedHeights {
 }
 
 /** Works out the heights of a plan; null where the drawing's own numbers are out of range. */
-export function readHeights({ head, terms }: Pick<JobPlan, 'head' | 'terms'>, heightIsKnown: boolean): PlannedHeights | null {
+export function readHeights(
+  { head, terms }: Pick<JobPlan, 'head' | 'terms'>,
+  heightIsKnown: boolean,
+): PlannedHeights | null {
   const found = takeoff({
     datum: terms.datum,
     faceToShoulderIn: Number(head.faceToShoulderIn),

@@ -30,7 +30,12 @@ export interface DraftRead {
   readonly own: OwnCasingRead | null;
 }
 
-const missing = (field: string): FormFault => ({ field, kind: 'missing', text: { key: `plan.need.${field}` }, source: null });
+const missing = (field: string): FormFault => ({
+  field,
+  kind: 'missing',
+  text: { key: `plan.need.${field}` },
+  source: null,
+});
 
 /** What a typed field lacks; nothing when it was read. `optional` fields may be left open. */
 const lacks = (field: string, read: TypedNumber, optional = false): FormFault[] => {
@@ -40,7 +45,10 @@ const lacks = (field: string, read: TypedNumber, optional = false): FormFault[] 
 
 const of = (read: TypedNumber, otherwise: string): string => (read.is === 'read' ? read.decimal : otherwise);
 
-function readSettings({ ownSettings, units }: PlanDraft): { own: Partial<Record<SettingName, string>>; faults: FormFault[] } {
+function readSettings({ ownSettings, units }: PlanDraft): {
+  own: Partial<Record<SettingName, string>>;
+  faults: FormFault[];
+} {
   const reads = settingNames.map(
     (name) => [name, readTyped(ownSettings[name] ?? '', settingDefinitions[name].unit, units)] as const,
   );
@@ -133,7 +141,9 @@ export function readDraft(draft: PlanDraft, catalogue: Catalogue, day: string): 
     instrumentIds: instruments.length === 0,
   };
   const lacking = [
-    ...Object.keys(absent).filter((field) => absent[field]).map(missing),
+    ...Object.keys(absent)
+      .filter((field) => absent[field])
+      .map(missing),
     ...ownCasingFaults(own),
     ...lacks('targetHeightIn', height),
     ...lacks('standOffIn', standOff),
@@ -142,7 +152,9 @@ export function readDraft(draft: PlanDraft, catalogue: Catalogue, day: string): 
     ...lacks('test.allowedDropPsi', drop),
     ...settings.faults,
   ];
-  const judged = planFaults(plan, day).filter(({ about }) => !about.some((field) => absent[field] || (field === 'casing' && casing === null)));
+  const judged = planFaults(plan, day).filter(
+    ({ about }) => !about.some((field) => absent[field] || (field === 'casing' && casing === null)),
+  );
   const { casing: pipe } = plan;
   return {
     planning:
