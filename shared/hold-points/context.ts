@@ -1,3 +1,4 @@
+import { clockIsDoubtful } from '../job/actor';
 import type { JobState, PointState, Reading } from '../job/state';
 import type { Instrument, ProcedurePass, SettingName } from '../job/plan';
 import type { PointKind } from './points';
@@ -22,7 +23,23 @@ export interface PointContext {
   instrument(id: string | undefined): Instrument | undefined;
 }
 
-const newest = (readings: Reading[] | undefined): Reading | undefined => readings?.filter((one) => !one.late).at(-1);
+/**
+ * The reading of a field that counts: the one taken last, late ones left aside. Two devices send when they have a
+ * signal, so what arrives last may have been taken first; only where a clock is in doubt the order of arrival decides.
+ */
+export const readingThatCounts = (readings: readonly Reading[] | undefined): Reading | undefined => {
+  let counts: Reading | undefined;
+  for (const one of readings ?? []) {
+    if (one.late) continue;
+    const older =
+      counts !== undefined &&
+      !clockIsDoubtful(counts.at) &&
+      !clockIsDoubtful(one.at) &&
+      Date.parse(one.at.corrected) < Date.parse(counts.at.corrected);
+    if (!older) counts = one;
+  }
+  return counts;
+};
 
 const lastOf = <T>(items: T[], match: (item: T) => boolean): T | undefined => items.filter(match).at(-1);
 
@@ -40,7 +57,8 @@ export const contextOf = (state: JobState, point: PointState): PointContext => {
   const released = point.release ? new Set(point.release.readings) : null;
   const ofSite = (field: string): Reading[] | undefined =>
     released ? state.site[field]?.filter((one) => released.has(one.id)) : state.site[field];
-  const read = (field: string): Reading | undefined => newest(point.readings[field]) ?? newest(ofSite(field));
+  const read = (field: string): Reading | undefined =>
+    readingThatCounts(point.readings[field]) ?? readingThatCounts(ofSite(field));
   const value = (field: string): string | undefined => read(field)?.value;
   return {
     state,
@@ -55,9 +73,9 @@ export const contextOf = (state: JobState, point: PointState): PointContext => {
     },
     rows: (group) => {
       const found = new Set<number>();
-      for (const key of Object.keys(point.readings)) {
+      for (const [key, readings] of Object.entries(point.readings)) {
         const match = key.startsWith(`${group}.`) ? /^(\d+)\./.exec(key.slice(group.length + 1)) : null;
-        if (match) found.add(Number(match[1]));
+        if (match && readings.some((reading) => !reading.late)) found.add(Number(match[1]));
       }
       return [...found].sort((a, b) => a - b);
     },
@@ -69,4 +87,23 @@ export const contextOf = (state: JobState, point: PointState): PointContext => {
     pass: passOf(state, point),
     instrument: (id) => state.plan.instruments.find((one) => one.id === id),
   };
+};
+
+/** Clocks of two devices may differ by this much and still both be believed, in milliseconds. */
+const slackMs = 2 * 60_000;
+
+const takenBy = (readings: Record<string, Reading[]>, latest: number): Record<string, Reading[]> =>
+  Object.fromEntries(
+    Object.entries(readings).map(([field, all]) => [
+      field,
+      all.filter((one) => Date.parse(one.at.corrected) <= latest),
+    ]),
+  );
+
+/** The view of a point as it was at an instant (ISO): an act is judged by what had been read when it began. */
+export const contextAsOf = (state: JobState, point: PointState, at: string): PointContext => {
+  const latest = Date.parse(at) + slackMs;
+  const then = { ...point, readings: takenBy(point.readings, latest) };
+  const points = state.points.map((one) => (one.place.id === point.place.id ? then : one));
+  return contextOf({ ...state, points, site: takenBy(state.site, latest) }, then);
 };

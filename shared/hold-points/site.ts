@@ -1,6 +1,6 @@
-import { minutesBetween } from '../job/actor';
+import { clockIsDoubtful, minutesBetween } from '../job/actor';
 import type { JobState } from '../job/state';
-import { contextOf, type PointContext } from './context';
+import { contextAsOf, type PointContext } from './context';
 import type { GroupDefinition } from './definition';
 import { choice, quantity } from './fields';
 import { gasGroups, judgeFlame, permitGroup } from './gas';
@@ -35,7 +35,8 @@ export const jointIsHot = (state: JobState): boolean => {
 
 const since = (context: PointContext, field: string, stoppedAt: string): boolean => {
   const reading = context.read(field);
-  return reading !== undefined && minutesBetween(stoppedAt, reading.at.corrected) >= 0;
+  // with a clock in doubt nobody can say that it was read after the stop
+  return reading !== undefined && !clockIsDoubtful(reading.at) && minutesBetween(stoppedAt, reading.at.corrected) >= 0;
 };
 
 /**
@@ -45,7 +46,7 @@ const since = (context: PointContext, field: string, stoppedAt: string): boolean
 export const judgeResume = (state: JobState, at: string): Verdict[] => {
   const current = state.points.find((point) => point.status !== 'released') ?? state.points[0];
   if (!current || !state.stopped) return [];
-  const context = contextOf(state, current);
+  const context = contextAsOf(state, current, at);
   const stoppedAt = state.stopped.at.corrected;
   const air = released(state, 'hot-work-clearance') ? judgeFlame(context, at) : [];
   if (!jointIsHot(state)) return air;

@@ -1,5 +1,8 @@
 import { readingAgreement } from '../calculations/reading-agreement';
+import { samePerson } from '../job/actor';
 import type { Unit } from '../units/units';
+import type { Reading } from '../job/state';
+import { answer } from './computing';
 import type { PointContext } from './context';
 import type { FieldDefinition } from './definition';
 import { quantity } from './fields';
@@ -27,22 +30,43 @@ export interface TwoPersons {
   counted: string[];
 }
 
+interface OneHand {
+  field: string;
+  value: number;
+  reading: Reading;
+}
+
+/** The agreement of these readings, and the ones of them that count. */
+const agreementOf = (read: OneHand[], toleranceIn: number) => {
+  const found = answer(readingAgreement({ readingsIn: read.map((one) => one.value), toleranceIn }));
+  return found && { ...found, by: found.counted?.flatMap((place) => read[place] ?? []) ?? [] };
+};
+
 /** What two people measured, in inches, held together within the job's tolerance for two tapes. */
 export const twoPersons = (context: PointContext, base: string): TwoPersons => {
-  const read = hands.flatMap((hand) => {
-    const value = context.number(`${base}.${hand}`);
-    return value === undefined ? [] : [{ field: `${base}.${hand}`, value }];
+  const read = hands.flatMap((hand): OneHand[] => {
+    const field = `${base}.${hand}`;
+    const [value, reading] = [context.number(field), context.read(field)];
+    return value === undefined || reading === undefined ? [] : [{ field, value, reading }];
   });
   const [fields, readingsIn] = [read.map((one) => one.field), read.map((one) => one.value)];
-  const bothFirst = fields[0] === `${base}.first` && fields[1] === `${base}.second`;
-  const found = bothFirst ? readingAgreement({ readingsIn, toleranceIn: context.setting('tapesAgreeIn') }) : undefined;
-  if (!found?.ok) return { agreedIn: undefined, differenceIn: undefined, fields, readingsIn, counted: [] };
+  const none = { agreedIn: undefined, differenceIn: undefined, fields, readingsIn, counted: [] };
+  const [first, second, third] = read;
+  if (first?.field !== `${base}.first` || second?.field !== `${base}.second`) return none;
+  // Two readings of one hand prove nothing together: a third by one of the two settles it only with the other's.
+  const same = [first, second].find((one) => third && samePerson(one.reading.measuredBy, third.reading.measuredBy));
+  const toleranceIn = context.setting('tapesAgreeIn');
+  const plain = agreementOf([first, second], toleranceIn);
+  const apart = third && same ? [same === first ? second : first, third] : read;
+  const settled = plain?.agreed ? plain : agreementOf(apart, toleranceIn);
+  if (!plain || !settled) return none;
+  const found = settled.agreed ? settled : plain;
   return {
     agreedIn: found.valueIn ?? undefined,
     differenceIn: found.differenceIn,
     fields,
     readingsIn,
-    counted: found.counted?.flatMap((place) => fields[place] ?? []) ?? [],
+    counted: found.by.map((one) => one.field),
   };
 };
 

@@ -1,5 +1,5 @@
 import { fieldOf, reviewPoint, standingPhotos } from './review';
-import { contextOf } from '../hold-points/context';
+import { contextAsOf } from '../hold-points/context';
 import { judgeFlame } from '../hold-points/gas';
 import { siteGroups, sitePoint } from '../hold-points/site';
 import { definitionOf } from '../hold-points/definitions';
@@ -63,14 +63,23 @@ const readEntries = (entries: RecordEntry[], find: (key: string) => FieldDefinit
   return read;
 };
 
-/** A second measurement needs its first, and another hand than the first's. */
-const secondHandWrong = (read: Read[], measured: (field: string) => PersonRef | undefined): Decision | null => {
-  for (const { field, measuredBy } of read) {
-    if (!field.confirms) continue;
-    const own = read.find((one) => one.field.key === field.confirms);
-    const first = own?.measuredBy ?? measured(field.confirms);
-    if (!first) return refuse('first-measurement-missing', { missing: [`field:${field.confirms}`] });
-    if (samePerson(first, measuredBy)) return refuse('same-person-measured', { params: { name: measuredBy.name } });
+/**
+ * A second measurement needs its first, and another hand than the first's; so does a first that is taken again after
+ * the second. `fields` are all that the point asks for.
+ */
+const secondHandWrong = (
+  read: Read[],
+  fields: readonly FieldDefinition[],
+  measured: (field: string) => PersonRef | undefined,
+): Decision | null => {
+  const now = (key: string): PersonRef | undefined =>
+    read.findLast((one) => one.field.key === key)?.measuredBy ?? measured(key);
+  const touched = (key: string): boolean => read.some((one) => one.field.key === key);
+  for (const { key, confirms } of fields) {
+    if (confirms === undefined || !(touched(key) || touched(confirms))) continue;
+    const [first, second] = [now(confirms), now(key)];
+    if (!first) return refuse('first-measurement-missing', { missing: [`field:${confirms}`] });
+    if (second && samePerson(first, second)) return refuse('same-person-measured', { params: { name: second.name } });
   }
   return null;
 };
@@ -106,7 +115,7 @@ export const decideRecord: Decider<'record'> = (input) => {
   if (read.every(({ field }) => field.site)) return recordAtSite(input);
   const standing = standingOf(point, at.corrected);
   if (isDecision(standing)) return standing;
-  const wrongHand = secondHandWrong(read, (field) => review.context.read(field)?.measuredBy);
+  const wrongHand = secondHandWrong(read, review.fields, (field) => review.context.read(field)?.measuredBy);
   if (wrongHand) return wrongHand;
   const recorded = event(input, 'readings-recorded', {
     point: point.place.id,
@@ -140,7 +149,7 @@ export const decideSetPhotoAside: Decider<'set-photo-aside'> = (input) => {
 
 /** What would be judged if this act began at `at`: the screen asks the same before the tap. */
 export const judgeActBegin = (state: JobState, point: PointState, act: string, at: string) => {
-  const context = contextOf(state, point);
+  const context = contextAsOf(state, point, at);
   const definition = definitionOf(point.place.kind);
   const found = definition.acts(context).find((one) => one.key === act);
   return found ? [...(found.flame ? judgeFlame(context, at) : []), ...(definition.beforeAct?.(context, act, at) ?? [])] : null;

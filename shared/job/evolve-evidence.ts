@@ -2,8 +2,12 @@ import type { JobEvent, JobEventOf } from './events';
 import { changePoint } from './points';
 import type { Custody, JobState, Reading } from './state';
 
-const append = (readings: Record<string, Reading[]>, added: Reading[]): Record<string, Reading[]> =>
-  added.reduce((all, reading) => ({ ...all, [reading.field]: [...(all[reading.field] ?? []), reading] }), readings);
+/** One copy for a whole command: a recorder's file brings hundreds of readings, and a fold runs over every event. */
+const append = (readings: Record<string, Reading[]>, added: Reading[]): Record<string, Reading[]> => {
+  const all = { ...readings };
+  for (const reading of added) all[reading.field] = [...(all[reading.field] ?? []), reading];
+  return all;
+};
 
 const plugField = /^plug\.(\d)\.(out|where|holder|back)$/;
 

@@ -108,7 +108,9 @@ export const fieldOf = (review: Pick<PointReview, 'groups'>, key: string): (Fiel
     const row = /\.(\d+)\./.exec(key)?.[1];
     const match = group.fields.find((field) => field.key === key || (group.rows && field.key === template));
     if (!match) continue;
-    if (group.rows && match.key !== key && (row === undefined || Number(row) < 1 || Number(row) > group.rows.max)) return undefined;
+    // a row has one name: `007` would be another row 7
+    const rowFits = row !== undefined && /^[1-9]\d*$/.test(row) && Number(row) <= (group.rows?.max ?? 0);
+    if (group.rows && match.key !== key && !rowFits) return undefined;
     return { ...match, key, group: group.key };
   }
   return undefined;

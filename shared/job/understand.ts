@@ -3,11 +3,13 @@ import { convertIfAlike, parseQuantity, toDecimal, UNITS, type Unit } from '../u
 
 export type Understood = { ok: true; value: string } | { ok: false; reason: string };
 
-const isUnit = (unit: string): unit is Unit => unit in UNITS;
+const isUnit = (unit: string): unit is Unit => Object.hasOwn(UNITS, unit);
 const instantPattern = /^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}(:\d{2}(\.\d{1,3})?)?(Z|[+-]\d{2}:\d{2})$/;
 
 const understandQuantity = (typed: string, unitTyped: string | null, unit: Unit): Understood => {
-  const spoken = unitTyped !== null && isUnit(unitTyped) ? unitTyped : unit;
+  // a unit that is not known must not pass for the field's own: 10 of something is not 10 psi
+  if (unitTyped !== null && !isUnit(unitTyped)) return { ok: false, reason: 'quantity-unit-unknown' };
+  const spoken = unitTyped ?? unit;
   const parsed = parseQuantity(typed, spoken);
   if (!parsed.ok) return { ok: false, reason: parsed.reason };
   if (parsed.unit === unit) return { ok: true, value: parsed.exact };
@@ -39,9 +41,10 @@ export const understand = (field: FieldDefinition, typed: string, unitTyped: str
       return instantPattern.test(trimmed) && Number.isFinite(Date.parse(trimmed))
         ? { ok: true, value: new Date(Date.parse(trimmed)).toISOString() }
         : { ok: false, reason: 'time-not-understood' };
+    case 'instrument':
+      return { ok: true, value: trimmed };
     case 'text':
     case 'names':
-    case 'instrument':
     case 'welders':
       return { ok: true, value: typed };
   }
