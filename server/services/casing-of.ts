@@ -28,6 +28,9 @@ export function casingOf(chosen: Planning['casing']): Casing | null {
   if (!mandrel.ok) return null;
   return {
     ...chosen,
+    odIn: toDecimal(odIn),
+    weightLbFt: toDecimal(Number(chosen.weightLbFt)),
+    wallIn: toDecimal(Number(chosen.wallIn)),
     idIn: toDecimal(mandrel.insideDiameterIn),
     driftIn: toDecimal(mandrel.driftIn),
     ownRow: true,

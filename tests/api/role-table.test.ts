@@ -1,8 +1,6 @@
 import type { Response } from 'supertest';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { demoOperators } from '../../server/demo/operators';
 import type { DemoKey } from '../../server/demo/people';
-import { demoPeopleByKey } from '../../server/demo/people';
 import { allRoutes } from '../../shared/contracts';
 import type { RouteContract } from '../../shared/contracts/contract';
 import { pathWith } from '../../shared/contracts/contract';
@@ -11,6 +9,7 @@ import { roles } from '../../shared/permissions';
 import type { Role } from '../../shared/permissions';
 import { aJobOn, browserOf, sha256 } from '../support/a-job-on';
 import type { JobOn } from '../support/a-job-on';
+import { strangers } from '../support/a-planning';
 import { commandBodies } from '../support/command-bodies';
 import { aJpeg } from '../support/images/make';
 import { startTestApp } from '../support/test-app';
@@ -23,19 +22,6 @@ const keyOf: Record<Role, DemoKey> = {
   tool_pusher: 'toolPusher',
   auditor: 'auditor',
   coordinator: 'coordinator',
-};
-
-/** Other people, another operator: nobody of the table has to do with it, save that a coordinator sees every job. */
-const strangers = () => {
-  const operator = demoOperators[1];
-  const people = (
-    [
-      ['secondWelder', 'welder'],
-      ['secondCompanyRep', 'company_rep'],
-      ['secondToolPusher', 'tool_pusher'],
-    ] as const
-  ).map(([key, role]) => ({ accountId: demoPeopleByKey[key].id, role }));
-  return { operatorId: operator.id, rigId: operator.rigs[0].id, people };
 };
 
 const nameOf = ({ method, path }: RouteContract): string => `${method} ${path}`;
