@@ -56,6 +56,7 @@ export default {
     photo: 'Photo: {label}',
     begin: 'Begin: {label}',
     end: 'End: {label}',
+    endAfter: 'End: {label}, {time}',
     present: 'Present',
     presentOutside: 'Present as it is',
     again: 'Measure again',
