@@ -5,11 +5,13 @@ import errors from './errors';
 import fileRefusals from './file-refusals';
 import calculations from './calculations';
 import photos from './photos';
+import desk from './desk';
 import drawing from './drawing';
 import entry from './entry';
 import job from './job';
 import jobs from './jobs';
 import limits from './limits';
+import packets from './packets';
 import plan from './plan';
 import planFaults from './plan-faults';
 import points from './points';
@@ -24,11 +26,13 @@ export default {
   errors: { ...errors, ...fileRefusals, command: commandErrors.command, field: { ...errors.field, ...commandErrors.field } },
   calculations,
   photos,
+  desk,
   drawing,
   entry,
   job,
   jobs,
   limits,
+  packets,
   plan,
   planFaults,
   points,
