@@ -2,7 +2,9 @@ import { clockIsDoubtful, minutesBetween } from '../job/actor';
 import type { PointContext } from './context';
 import type { GroupDefinition } from './definition';
 import { check, instrument, quantity, time, words } from './fields';
+import { judgeInstrument } from './instruments';
 import { bySetting, commonPractice, judgeCheck, judgeFact, judgeRange, standard } from './judging';
+import { siteDay } from './site-day';
 import type { Verdict } from './verdict';
 
 /** Where the air is sampled. */
@@ -16,6 +18,8 @@ const gases = [
 
 const readingKeys = gasPlaces.flatMap((place) => gases.map((gas) => `gas.${place}.${gas.key}`));
 
+const meterField = instrument('gas.meter', ['gas-meter'], { site: true });
+
 /** The gas check: of the site, read again whenever it has grown old. */
 export const gasGroups = (): GroupDefinition[] => [
   ...gasPlaces.map((place) => ({
@@ -25,7 +29,7 @@ export const gasGroups = (): GroupDefinition[] => [
   {
     key: 'gas-meter',
     fields: [
-      instrument('gas.meter', ['gas-meter'], { site: true }),
+      meterField,
       check('gas.bump-tested', { site: true }),
       check('gas.monitor', { site: true }),
     ],
@@ -42,6 +46,20 @@ export const permitGroup = (): GroupDefinition => ({
   ],
 });
 
+/** Less than none of a gas is a meter that was not zeroed: what it says of the air is worth nothing. */
+const judgeZeroed = (context: PointContext, field: string, unit: 'pct' | 'ppm'): Verdict[] => {
+  const measured = context.number(field);
+  return judgeFact(context, {
+    limit: `${field}.zeroed`,
+    kind: 'stop',
+    about: [field],
+    source: commonPractice,
+    says: 'gas-zeroed',
+    params: { measured: { quantity: String(measured ?? 0), unit } },
+    holds: measured === undefined ? undefined : measured >= 0,
+  }).filter((verdict) => verdict.outcome === 'outside');
+};
+
 /** Every gas reading against its limit. A gas limit is a stop: nobody can concede it. */
 export const judgeGas = (context: PointContext): Verdict[] =>
   gasPlaces.flatMap((place) => {
@@ -54,6 +72,7 @@ export const judgeGas = (context: PointContext): Verdict[] =>
       says: `gas-${gas}`,
     });
     return [
+      ...gases.flatMap((gas) => judgeZeroed(context, at(gas.key), gas.unit)),
       ...judgeRange(context, { ...held('oxygen'), unit: 'pct', min: 19.5, max: 23.5, source: standard('29 CFR 1910.146(b)') }),
       ...judgeRange(context, {
         ...held('flammable'),
@@ -66,11 +85,27 @@ export const judgeGas = (context: PointContext): Verdict[] =>
     ];
   });
 
+/** Today is the site's day on which the air was read: yesterday's bump test says nothing of it. */
+const judgeBumpTest = (context: PointContext): Verdict[] => {
+  const test = context.read('gas.bump-tested');
+  const { zone } = context.state.plan;
+  const airRead = oldestGasReading(context);
+  const sameDay =
+    test === undefined || airRead === undefined || siteDay(zone, test.at.corrected) >= siteDay(zone, airRead);
+  return judgeFact(context, {
+    limit: 'gas.bump-tested',
+    kind: 'stop',
+    about: ['gas.bump-tested'],
+    source: commonPractice,
+    holds: test === undefined ? undefined : test.value === 'yes' && sameDay,
+  });
+};
+
 /** The meter bump-tested today, a continuous monitor in place, and no doubt about when the air was read. */
 export const judgeGasMeter = (context: PointContext): Verdict[] => {
   const read = readingKeys.flatMap((key) => context.read(key) ?? []);
   return [
-    ...judgeCheck(context, 'gas.bump-tested', 'stop'),
+    ...judgeBumpTest(context),
     ...judgeCheck(context, 'gas.monitor', 'stop'),
     ...judgeFact(context, {
       limit: 'gas-clock',
@@ -113,7 +148,9 @@ export const judgeFlame = (context: PointContext, at: string): Verdict[] => {
           source: bySetting(context, 'gasFreshMin'),
         })),
     ...air.filter((verdict) => verdict.outcome === 'outside'),
-    ...judgeGasMeter(context).filter((verdict) => verdict.outcome === 'outside'),
+    ...[...judgeGasMeter(context), ...judgeInstrument(context, meterField)].filter(
+      (verdict) => verdict.outcome === 'outside',
+    ),
     ...judgeFact(context, {
       limit: 'permit-in-force',
       kind: 'stop',

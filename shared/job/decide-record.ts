@@ -1,11 +1,13 @@
 import { fieldOf, reviewPoint, standingPhotos } from './review';
-import { contextAsOf } from '../hold-points/context';
+import { contextAsOf, type PointContext } from '../hold-points/context';
 import { judgeFlame } from '../hold-points/gas';
+import { commonPractice, judgeFact } from '../hold-points/judging';
 import { siteGroups, sitePoint } from '../hold-points/site';
+import type { Verdict } from '../hold-points/verdict';
 import { definitionOf } from '../hold-points/definitions';
 import type { FieldDefinition } from '../hold-points/definition';
 import type { RecordEntry } from '../contracts/commands';
-import { samePerson, type PersonRef } from './actor';
+import { clockIsDoubtful, samePerson, type PersonRef } from './actor';
 import { accept, event, pointNamed, refuse, type Decider, type Decision, type Deciding } from './decision';
 import type { RecordedEntry } from './events';
 import { currentPoint } from './points';
@@ -147,12 +149,30 @@ export const decideSetPhotoAside: Decider<'set-photo-aside'> = (input) => {
   return accept(event(input, 'photo-set-aside', command.body));
 };
 
-/** What would be judged if this act began at `at`: the screen asks the same before the tap. */
-export const judgeActBegin = (state: JobState, point: PointState, act: string, at: string) => {
+/** Without a sure time nobody knows how old the air is: a stop for fire, a hold for every other act. */
+const judgeActClock = (context: PointContext, flame: boolean): Verdict[] =>
+  judgeFact(context, { limit: 'act-clock', kind: flame ? 'stop' : 'hold', about: [], source: commonPractice, holds: false });
+
+/**
+ * What would be judged if this act began at `at` (ISO): the screen asks the same before the tap. Null where the point
+ * has no such act. `doubtful`: the clock that says `at` is in doubt.
+ */
+export const judgeActBegin = (
+  state: JobState,
+  point: PointState,
+  act: string,
+  at: string,
+  doubtful = false,
+): Verdict[] | null => {
   const context = contextAsOf(state, point, at);
   const definition = definitionOf(point.place.kind);
   const found = definition.acts(context).find((one) => one.key === act);
-  return found ? [...(found.flame ? judgeFlame(context, at) : []), ...(definition.beforeAct?.(context, act, at) ?? [])] : null;
+  if (!found) return null;
+  return [
+    ...(doubtful ? judgeActClock(context, found.flame) : []),
+    ...(found.flame ? judgeFlame(context, at) : []),
+    ...(definition.beforeAct?.(context, act, at) ?? []),
+  ];
 };
 
 export const decideBeginAct: Decider<'begin-act'> = (input) => {
@@ -165,7 +185,7 @@ export const decideBeginAct: Decider<'begin-act'> = (input) => {
   if (point.status !== 'open') return refuse('point-not-open', { since: point.release ?? point.presentation });
   const running = currentPoint(state)?.acts.find((run) => run.ended === null);
   if (running) return refuse('act-running', { since: running.begun });
-  const verdicts = judgeActBegin(state, point, act, at.corrected);
+  const verdicts = judgeActBegin(state, point, act, at.corrected, clockIsDoubtful(at));
   if (verdicts === null) return refuse('no-such-act');
   const blockers = verdicts.filter((verdict) => verdict.kind === 'stop' && verdict.outcome === 'outside');
   if (blockers.length > 0) return refuse('act-not-ready', { blockers });

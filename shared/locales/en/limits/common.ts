@@ -16,6 +16,10 @@ export default {
     within: 'Carbon monoxide is below {max}.',
     outside: 'Carbon monoxide reads {measured}; it must be below {max}. Stop engines near the cellar, air the place and read again.',
   },
+  'gas-zeroed': {
+    within: 'The meter reads no less than nothing.',
+    outside: 'The meter reads {measured}, less than nothing: it is not zeroed. Zero it in clean air, bump-test it and read again.',
+  },
   'gas-bump-tested': {
     within: 'The meter was bump-tested today.',
     outside: 'The meter has not been bump-tested today. Test it, or take one that has been.',
@@ -43,6 +47,18 @@ export default {
   'clock-doubt': {
     within: 'The times of these readings are sure.',
     outside: 'The clock of the device that recorded this was not checked, or is in doubt by more than two minutes. Connect, let it check the clock, and read again; or let the company representative concede it.',
+  },
+  'act-clock': {
+    within: 'The time of this act is sure.',
+    outside: 'The clock of this device was not checked, or is in doubt by more than two minutes: how old the readings are cannot be told. Connect, let it check the clock, then begin.',
+  },
+  'act-times': {
+    within: 'The times of this act are sure.',
+    outside: '{act}: its times are not sure, because a clock was not checked or two clocks contradict each other. Let the company representative concede it.',
+  },
+  'instrument-listed': {
+    within: '{name} is on the job’s list.',
+    outside: '{name} is not an instrument of this job that reads this. Choose one from the job’s list.',
   },
   calibration: {
     within: '{name} is in calibration until {until}.',
