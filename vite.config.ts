@@ -16,7 +16,12 @@ export default defineConfig(({ isSsrBuild }) => ({
         minify: false,
         sourcemap: true,
         rolldownOptions: {
-          input: { main: 'server/main.ts', migrate: 'server/migrate.ts', demo: 'server/demo.ts' },
+          input: {
+            main: 'server/main.ts',
+            migrate: 'server/migrate.ts',
+            demo: 'server/demo.ts',
+            rebuild: 'server/rebuild.ts',
+          },
         },
       }
     : { outDir: 'dist/client', emptyOutDir: true, target: 'es2022', sourcemap: false, assetsInlineLimit: 0 },
