@@ -8,7 +8,10 @@ export function makeRouter(): Router {
   const router = createRouter({
     history: createWebHistory(),
     routes,
-    scrollBehavior: (_to, _from, saved) => saved ?? { top: 0 },
+    scrollBehavior: (to, from, saved) => {
+      if (to.hash !== '') return to.path === from.path ? { el: to.hash } : false;
+      return saved ?? { top: 0 };
+    },
   });
   router.beforeEach(guard);
   router.afterEach((to) => {
