@@ -9,9 +9,10 @@ import type { ActDefinition, GroupDefinition, PointDefinition } from './definiti
 import { doneBefore } from './done-before';
 import { quantity, welders } from './fields';
 import { judgeLook, lookGroups } from './imperfections';
-import { byProcedure, judgeRange, standard } from './judging';
+import { byProcedure, commonPractice, judgeFact, judgeRange, standard } from './judging';
 import { computeOrientation, judgeOrientation, orientationGroups } from './orientation';
 import { judgeBeforePass, judgePassTemperatures, passTemperatureGroup } from './pass-temperatures';
+import { judgePlugsOut } from './plug-in-port';
 import { judgeWelders } from './qualified-welders';
 import { rodFactsOf } from './rod-facts';
 import { judgeRods, rodGroup } from './rods';
@@ -56,6 +57,19 @@ const acts = (context: PointContext): ActDefinition[] =>
     flame: true,
     required: !doneBefore(context, key),
   }));
+
+/** The root is not laid over a head that nobody has tacked and looked at again. */
+const judgeTacked = (context: PointContext): Verdict[] => {
+  if (!startsWithTacks(context)) return [];
+  const tacked = context.point.acts.some((run) => run.act === 'tacks' && run.ended) || doneBefore(context, 'tacks');
+  return judgeFact(context, {
+    limit: 'tacked-first',
+    kind: 'stop',
+    about: [],
+    source: commonPractice,
+    holds: tacked,
+  }).filter((verdict) => verdict.outcome === 'outside');
+};
 
 const judgeUndercut = (context: PointContext): Verdict[] => {
   const undercutIn = context.number('undercut');
@@ -143,5 +157,8 @@ export const passInspected: PointDefinition = {
     ...judgeUndercut(context),
     ...judgeLeg(context),
   ],
-  beforeAct: (context, act, at) => (act === 'pass' ? [...judgeBeforePass(context, at), ...judgeWelders(context)] : []),
+  beforeAct: (context, act, at) => [
+    ...judgePlugsOut(context),
+    ...(act === 'pass' ? [...judgeTacked(context), ...judgeBeforePass(context, at), ...judgeWelders(context)] : []),
+  ],
 };

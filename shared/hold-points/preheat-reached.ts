@@ -8,6 +8,7 @@ import { byQuarter, check, choice, instrument, quantity, quarters } from './fiel
 import { fluidBelowWeldIn } from './final-cut';
 import { byDrawing, byProcedure, commonPractice, judgeCheck, judgeFact, judgeRange, standard } from './judging';
 import { doneBefore } from './done-before';
+import { judgePlugsOut } from './plug-in-port';
 import type { Computed, Verdict } from './verdict';
 
 const isRepair = (context: PointContext): boolean => context.point.place.round > 0;
@@ -187,5 +188,8 @@ export const preheatReached: PointDefinition = {
     }),
     ...judgeAdvice(context),
   ],
-  beforeAct: (context, act) => (isRepair(context) && act === 'preheat' ? judgeExcavation(context, false) : []),
+  beforeAct: (context, act) => [
+    ...judgePlugsOut(context),
+    ...(isRepair(context) && act === 'preheat' ? judgeExcavation(context, false) : []),
+  ],
 };

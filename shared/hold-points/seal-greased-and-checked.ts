@@ -1,3 +1,4 @@
+import { clockIsDoubtful } from '../job/actor';
 import type { PointContext } from './context';
 import type { GroupDefinition, PointDefinition } from './definition';
 import { check, choice, quantity, words } from './fields';
@@ -31,6 +32,15 @@ const sealGroups = (context: PointContext): GroupDefinition[] => [
   },
 ];
 
+/** A mark that was made before the direction was named again shows where the valve was wanted once. */
+const markedAsNamed = (context: PointContext): boolean => {
+  const mark = context.read('direction-marked');
+  const named = context.state.direction?.at;
+  if (mark?.value !== 'yes') return false;
+  const tells = named !== undefined && !clockIsDoubtful(named) && !clockIsDoubtful(mark.at);
+  return !tells || Date.parse(mark.at.corrected) >= Date.parse(named.corrected);
+};
+
 /** Named and marked before the head is lifted: turning it over the seal rolls the seal. */
 const judgeDirection = (context: PointContext): Verdict[] => [
   ...judgeFact(context, {
@@ -41,7 +51,13 @@ const judgeDirection = (context: PointContext): Verdict[] => [
     params: { direction: namedDirection(context) },
     holds: context.state.direction !== null,
   }),
-  ...judgeCheck(context, 'direction-marked', 'stop'),
+  ...judgeFact(context, {
+    limit: 'direction-marked',
+    kind: 'stop',
+    about: ['direction-marked'],
+    source: commonPractice,
+    holds: context.value('direction-marked') === undefined ? undefined : markedAsNamed(context),
+  }),
 ];
 
 const judgeSeal = (context: PointContext): Verdict[] => {
@@ -80,19 +96,14 @@ const judgeGrease = (context: PointContext): Verdict[] => [
 
 /** Before the lift every check that can't be made up for afterwards has to be answered with yes. */
 const judgeBeforeLift = (context: PointContext): Verdict[] => {
-  const answered = (field: string, says: string): Verdict[] =>
-    judgeFact(context, {
-      limit: field,
-      kind: 'stop',
-      about: [field],
-      source: commonPractice,
-      says,
-      holds: context.value(field) === 'yes',
-    });
+  const answered = (field: string, says: string, holds: boolean): Verdict[] =>
+    judgeFact(context, { limit: field, kind: 'stop', about: [field], source: commonPractice, says, holds });
   return [
     ...judgeDirection(context).filter((verdict) => verdict.limit === 'direction-named'),
-    ...answered('direction-marked', 'direction-marked'),
-    ...(hasSeal(context) ? answered('seal.sound', 'seal-sound-before-lift') : []),
+    ...answered('direction-marked', 'direction-marked', markedAsNamed(context)),
+    ...(hasSeal(context)
+      ? answered('seal.sound', 'seal-sound-before-lift', context.value('seal.sound') === 'yes')
+      : []),
   ];
 };
 

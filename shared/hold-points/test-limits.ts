@@ -5,6 +5,7 @@ import { judgeHold } from './hold-of-test';
 import { byDrawing, bySetting, commonPractice, judgeCheck, judgeFact, judgeRange, standard } from './judging';
 import { portsOf } from './ports';
 import { pressureLimitsOf } from './pressure-limits';
+import { judgeUsable } from './unusable';
 import type { Verdict } from './verdict';
 
 const targetOf = (context: PointContext): number => context.state.plan.terms.test.pressurePsi;
@@ -145,6 +146,10 @@ const judgeExclusion = (context: PointContext): Verdict[] =>
     ? judgeCheck(context, 'exclusion', 'stop', standard('ASME PCC-2 article 501'), 'exclusion-nitrogen')
     : judgeCheck(context, 'exclusion', 'advice', commonPractice, 'exclusion-oil');
 
+/** Stored energy and stand-off are worked out from the volume: less than nothing works out to no distance at all. */
+const judgeVolume = (context: PointContext): Verdict[] =>
+  judgeUsable(context, 'volume-usable', ['volume'], (context.number('volume') ?? 0) > 0);
+
 /** Everything about the test, in the order of its weight. */
 export const judgeTest = (context: PointContext, fullScalePsi: number | undefined): Verdict[] => [
   ...judgeTarget(context),
@@ -153,6 +158,7 @@ export const judgeTest = (context: PointContext, fullScalePsi: number | undefine
   ...judgeHold(context),
   ...judgeLeak(context),
   ...judgeGauge(context, fullScalePsi),
+  ...judgeVolume(context),
   ...judgeCustody(context),
   ...judgeExclusion(context),
   ...judgeCheck(context, 'port-probed', 'stop'),

@@ -30,6 +30,21 @@ const judgeCustody = (context: PointContext, port: number): Verdict[] => {
   });
 };
 
+/** After a test has put the plug back, an answer from before says nothing any more: it is looked at again. */
+const judgeStillOut = (context: PointContext, port: number): Verdict[] => {
+  const custody = context.state.custody.find((one) => one.port === port);
+  const claimed = context.point.release === null && context.value(`plug.${port}.out`) === 'yes';
+  return judgeFact(context, {
+    limit: `plug.${port}.still-out`,
+    kind: 'stop',
+    about: [`plug.${port}.out`],
+    source: commonPractice,
+    says: 'plug-back-in',
+    params: { port },
+    holds: claimed && custody ? custody.back === null : undefined,
+  }).filter((verdict) => verdict.outcome === 'outside');
+};
+
 /**
  * Point 7: every plug out and in somebody's keeping, so that heat and moisture find a way out. In a repair round the
  * pressure and the test medium go first.
@@ -56,6 +71,7 @@ export const testPlugRemoved: PointDefinition = {
       : []),
     ...portsOf(context.state.plan).flatMap((port) => [
       ...judgeCheck(context, `plug.${port}.out`, 'stop'),
+      ...judgeStillOut(context, port),
       ...judgeCheck(context, `port.${port}.clear`, 'stop'),
       ...judgeCustody(context, port),
     ]),

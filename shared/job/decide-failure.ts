@@ -1,7 +1,10 @@
 import { judgeResume } from '../hold-points/site';
+import type { Verdict } from '../hold-points/verdict';
 import { accept, event, jobContentMoved, refuse, signature, type Decider } from './decision';
-import { counts, currentPoint } from './points';
-import type { JobState } from './state';
+import { planRefused } from './plan-refused';
+import { counts, currentPoint, runningAct } from './points';
+import { covers, reviewPoint } from './review';
+import type { JobState, PointState } from './state';
 
 /** Opened from point 10 or 11, the last ones: before that a point is simply reopened. */
 export const decideOpenRepairRound: Decider<'open-repair-round'> = (input) => {
@@ -9,7 +12,8 @@ export const decideOpenRepairRound: Decider<'open-repair-round'> = (input) => {
   const current = currentPoint(state);
   const kind = current?.place.kind;
   if (!current || (kind !== 'cooled-to-touch' && kind !== 'pressure-test-held')) return refuse('no-round-here');
-  if (current.acts.some((run) => run.ended === null)) return refuse('act-running');
+  const running = runningAct(state);
+  if (running) return refuse('act-running', { since: running.begun });
   const { reason, passes } = command.body;
   return accept(
     event(input, 'repair-round-opened', { round: state.rounds.length + 1, passes, from: current.place.id, reason }),
@@ -18,11 +22,16 @@ export const decideOpenRepairRound: Decider<'open-repair-round'> = (input) => {
 
 /** The head is cut off again: back to point 1 with a new height and head. */
 export const decideSetAgain: Decider<'set-again'> = (input) => {
-  const { state, command } = input;
+  const { state, command, at } = input;
+  const running = runningAct(state);
+  if (running) return refuse('act-running', { since: running.begun });
   if (!state.headSet) return refuse('plan-not-workable', { params: { why: { key: 'refusals.head-never-set' } } });
   const moved = jobContentMoved(input, command.body);
   if (moved) return moved;
   const { reason, head, targetHeightIn } = command.body;
+  const terms = { ...state.plan.terms, targetHeightIn };
+  const unworkable = planRefused({ ...state.plan, head, terms, people: state.people }, at);
+  if (unworkable) return unworkable;
   return accept(
     event(input, 'setting-begun', {
       setting: state.setting + 1,
@@ -69,9 +78,23 @@ export const decideCallOff: Decider<'call-off'> = (input) => {
   );
 };
 
-/** Concessions that stand in the packet, read back before the seal: those of every point that was not superseded. */
+/** What is outside a hold at a point: as it was released, else by its evidence now. */
+const holdsOf = (state: JobState, point: PointState): Verdict[] =>
+  (point.release?.judged.verdicts ?? reviewPoint(state, point).verdicts).filter(
+    (verdict) => verdict.kind === 'hold' && verdict.outcome === 'outside',
+  );
+
+/**
+ * Concessions that stand, read back before the seal: those that a new reading has not voided, of every point that was
+ * neither superseded nor carried into a repair round.
+ */
 export const concessionTotal = (state: JobState): number =>
-  state.points.reduce((total, point) => total + point.concessions.length, 0);
+  state.points
+    .filter((point) => counts(point) && point.concessions.length > 0)
+    .reduce((total, point) => {
+      const conceded = (verdict: Verdict) => point.concessions.some((concession) => covers(concession, verdict));
+      return total + holdsOf(state, point).filter(conceded).length;
+    }, 0);
 
 export const decideSeal: Decider<'seal'> = (input) => {
   const { state, command } = input;

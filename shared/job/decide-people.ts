@@ -1,13 +1,17 @@
-import type { Role } from '../permissions/roles';
+import { onBothSides, type Role } from '../permissions/roles';
 import { accept, event, jobContentMoved, refuse, signature, type Decider } from './decision';
 import type { SettingName, Terms } from './plan';
 import { settingNames } from './plan';
+import { planRefused } from './plan-refused';
+import { withTrueSources } from './settings';
 import type { JobState } from './state';
 import { settingUsedBy, termUsedBy } from './terms-in-use';
 
 /** Any time before the head is lifted; after that turning it rolls the seal. */
 export const decideNameDirection: Decider<'name-direction'> = (input) => {
   if (input.state.headSet) return refuse('head-already-set');
+  const { direction, words } = input.command.body;
+  if (direction === 'other' && words === null) return refuse('direction-without-words');
   return accept(event(input, 'direction-named', input.command.body));
 };
 
@@ -38,13 +42,16 @@ const inUse = (state: JobState, terms: Terms): string[] => {
 
 /** Before point 1 is released the coordinator may still mend the plan; after that it takes the representative's signature. */
 export const decideChangeTerms: Decider<'change-terms'> = (input) => {
-  const { state, command, actor } = input;
-  const { terms, reason } = command.body;
+  const { state, command, actor, at } = input;
+  const { reason } = command.body;
+  const terms = withTrueSources(command.body.terms);
   const begun = state.points.some((point) => point.status === 'released');
   const isRep = actor.roles.includes('company_rep');
   if (begun && !isRep) return refuse('terms-need-signature');
   const used = inUse(state, terms);
   if (used.length > 0) return refuse('terms-in-use', { missing: used.map((name) => `term:${name}`) });
+  const unworkable = planRefused({ ...state.plan, terms, people: state.people }, at);
+  if (unworkable) return unworkable;
   const moved = jobContentMoved(input, command.body);
   if (moved) return moved;
   const signed = isRep ? signature(input, 'change-terms', command.body) : null;
@@ -55,6 +62,8 @@ export const decideAssignPerson: Decider<'assign-person'> = (input) => {
   const { person } = input.command.body;
   const held = input.state.people.some((one) => one.accountId === person.accountId && one.role === person.role);
   if (held) return refuse('role-already-held', { params: { name: person.name } });
+  const roles = input.state.people.filter((one) => one.accountId === person.accountId).map((one) => one.role);
+  if (onBothSides([...roles, person.role])) return refuse('roles-not-together', { params: { name: person.name } });
   return accept(event(input, 'person-assigned', { person }));
 };
 

@@ -7,10 +7,10 @@ import type { Verdict } from '../hold-points/verdict';
 import { definitionOf } from '../hold-points/definitions';
 import type { FieldDefinition } from '../hold-points/definition';
 import type { RecordEntry } from '../contracts/commands';
-import { clockIsDoubtful, samePerson, type PersonRef } from './actor';
+import { clockIsDoubtful, samePerson, type PersonRef, type Times } from './actor';
 import { accept, event, pointNamed, refuse, type Decider, type Decision, type Deciding } from './decision';
 import type { RecordedEntry } from './events';
-import { currentPoint } from './points';
+import { runningAct } from './points';
 import type { JobState, PointState } from './state';
 import { understand } from './understand';
 
@@ -38,6 +38,13 @@ const standingOf = (point: PointState, correctedAt: string): Standing => {
   }
 };
 
+/** The points of a second setting carry the names of the first's: what was taken before it began is none of theirs. */
+const settingOver = (state: JobState, at: Times): Decision | null => {
+  const begun = state.earlierSettings.at(-1)?.ended;
+  const before = begun && !clockIsDoubtful(at) && Date.parse(at.corrected) < Date.parse(begun.at.corrected);
+  return before ? refuse('of-earlier-setting', { since: begun }) : null;
+};
+
 const withdrawal = (input: Deciding<'record'> | Deciding<'add-photo'>, point: string) =>
   event(input, 'presentation-withdrawn', { point, reason: null, cause: 'late-evidence' });
 
@@ -48,11 +55,22 @@ interface Read {
   measuredBy: PersonRef;
 }
 
+/** Who measured, under the name that the job knows; undefined for an account that is not on the job. */
+const measurerOf = ({ state, stamp }: Deciding<'record'>, named: PersonRef | null): PersonRef | undefined => {
+  const self = { accountId: stamp.accountId, name: stamp.name };
+  if (named === null || named.accountId === stamp.accountId) return self;
+  if (named.accountId === null) return named;
+  const person = state.people.find((one) => one.accountId === named.accountId);
+  return person && { accountId: person.accountId, name: person.name };
+};
+
 /** Understands every entry or says at the first that is not, which one and why. */
-const readEntries = (entries: RecordEntry[], find: (key: string) => FieldDefinition | undefined, self: PersonRef): Read[] | Decision => {
+const readEntries = (input: Deciding<'record'>, find: (key: string) => FieldDefinition | undefined): Read[] | Decision => {
   const read: Read[] = [];
-  for (const entry of entries) {
+  for (const entry of input.command.body.entries) {
     const field = find(entry.field);
+    const measuredBy = measurerOf(input, entry.measuredBy);
+    if (!measuredBy) return refuse('measurer-not-on-job', { params: { name: entry.measuredBy?.name ?? '' } });
     if (!field) return refuse('no-such-field', { params: { field: entry.field } });
     const understood = understand(field, entry.typed, entry.unit);
     if (!understood.ok)
@@ -60,7 +78,7 @@ const readEntries = (entries: RecordEntry[], find: (key: string) => FieldDefinit
         params: { typed: entry.typed, why: { key: `entry.${understood.reason}` } },
         missing: [`field:${entry.field}`],
       });
-    read.push({ entry, field, value: understood.value, measuredBy: entry.measuredBy ?? self });
+    read.push({ entry, field, value: understood.value, measuredBy });
   }
   return read;
 };
@@ -98,24 +116,22 @@ const toEntries = (commandId: string, read: Read[]): RecordedEntry[] =>
   }));
 
 const recordAtSite = (input: Deciding<'record'>): Decision => {
-  const self = { accountId: input.stamp.accountId, name: input.stamp.name };
   const groups = siteGroups();
-  const read = readEntries(input.command.body.entries, (key) => fieldOf({ groups }, key), self);
+  const read = readEntries(input, (key) => fieldOf({ groups }, key));
   if (!Array.isArray(read)) return read;
   return accept(event(input, 'readings-recorded', { point: sitePoint, entries: toEntries(input.command.id, read), late: false }));
 };
 
 export const decideRecord: Decider<'record'> = (input) => {
-  const { state, command, at, stamp } = input;
+  const { state, command, at } = input;
   if (command.body.point === sitePoint) return recordAtSite(input);
   const point = pointNamed(state, command.body.point);
   if (!point) return refuse('no-such-point');
-  const self = { accountId: stamp.accountId, name: stamp.name };
   const review = reviewPoint(state, point);
-  const read = readEntries(command.body.entries, (key) => fieldOf(review, key), self);
+  const read = readEntries(input, (key) => fieldOf(review, key));
   if (!Array.isArray(read)) return read;
   if (read.every(({ field }) => field.site)) return recordAtSite(input);
-  const standing = standingOf(point, at.corrected);
+  const standing = settingOver(state, at) ?? standingOf(point, at.corrected);
   if (isDecision(standing)) return standing;
   const wrongHand = secondHandWrong(read, review.fields, (field) => review.context.read(field)?.measuredBy);
   if (wrongHand) return wrongHand;
@@ -134,7 +150,7 @@ export const decideAddPhoto: Decider<'add-photo'> = (input) => {
   if (!point) return refuse('no-such-point');
   const review = reviewPoint(state, point);
   if (!review.shots.some((shot) => shot.key === rest.shot)) return refuse('no-such-shot', { params: { shot: rest.shot } });
-  const standing = standingOf(point, at.corrected);
+  const standing = settingOver(state, at) ?? standingOf(point, at.corrected);
   if (isDecision(standing)) return standing;
   const added = event(input, 'photo-added', { point: id, photo: command.id, ...rest, takenAt, late: standing.late });
   return standing.withdraws ? accept(withdrawal(input, id), added) : accept(added);
@@ -149,9 +165,9 @@ export const decideSetPhotoAside: Decider<'set-photo-aside'> = (input) => {
   return accept(event(input, 'photo-set-aside', command.body));
 };
 
-/** Without a sure time nobody knows how old the air is: a stop for fire, a hold for every other act. */
+/** Without a sure time nobody knows how old the air is: a stop for fire; every other act is held by its times later. */
 const judgeActClock = (context: PointContext, flame: boolean): Verdict[] =>
-  judgeFact(context, { limit: 'act-clock', kind: flame ? 'stop' : 'hold', about: [], source: commonPractice, holds: false });
+  judgeFact(context, { limit: 'act-clock', kind: flame ? 'stop' : 'advice', about: [], source: commonPractice, holds: false });
 
 /**
  * What would be judged if this act began at `at` (ISO): the screen asks the same before the tap. Null where the point
@@ -181,9 +197,11 @@ export const decideBeginAct: Decider<'begin-act'> = (input) => {
   const point = pointNamed(state, id);
   if (!point) return refuse('no-such-point');
   if (state.stopped) return refuse('work-stopped', { since: state.stopped });
+  const over = settingOver(state, at);
+  if (over) return over;
   if (point.status === 'shut') return refuse('point-shut');
   if (point.status !== 'open') return refuse('point-not-open', { since: point.release ?? point.presentation });
-  const running = currentPoint(state)?.acts.find((run) => run.ended === null);
+  const running = runningAct(state);
   if (running) return refuse('act-running', { since: running.begun });
   const verdicts = judgeActBegin(state, point, act, at.corrected, clockIsDoubtful(at));
   if (verdicts === null) return refuse('no-such-act');

@@ -1,7 +1,8 @@
 import { ownerOf } from '../hold-points/points';
 import { samePerson } from './actor';
 import { accept, contentMoved, event, pointNamed, refuse, signature, type Decider, type Decision, type JobActor } from './decision';
-import type { AsJudged } from './events';
+import type { AsJudged, JobEventOf } from './events';
+import { runningAct } from './points';
 import { covers, reviewPoint, standingPhotos, type PointReview } from './review';
 import type { JobState, PointState } from './state';
 
@@ -94,13 +95,14 @@ export const decideConcede: Decider<'concede'> = (input) => {
   if (early) return early;
   const review = reviewPoint(state, point);
   if (handIsIn(review, point, actor)) return refuse('own-evidence');
-  const items = [];
+  const items: JobEventOf<'reading-conceded'>['body']['items'] = [];
   for (const item of command.body.items) {
     const verdict = review.verdicts.find((one) => one.limit === item.limit);
     if (verdict?.outcome === 'outside' && verdict.kind === 'stop') return refuse('cannot-concede-stop', { blockers: [verdict] });
     const hold = review.unconceded.find((one) => one.limit === item.limit);
     if (!hold) return refuse('nothing-to-concede', { params: { limit: item.limit } });
-    if (!covers({ ...item, verdict: hold } as Parameters<typeof covers>[0], hold)) return refuse('verdict-moved', { blockers: [hold] });
+    if (!covers({ ...item, verdict: hold }, hold)) return refuse('verdict-moved', { blockers: [hold] });
+    if (items.some((one) => one.limit === item.limit)) return refuse('nothing-to-concede', { params: { limit: item.limit } });
     items.push({ limit: item.limit, basis: hold.basis, reason: item.reason, verdict: hold });
   }
   return accept(
@@ -113,6 +115,8 @@ export const decideReopen: Decider<'reopen'> = (input) => {
   const point = pointNamed(state, command.body.point);
   if (!point) return refuse('no-such-point');
   if (point.status !== 'released') return refuse('point-not-released');
+  const running = runningAct(state);
+  if (running) return refuse('act-running', { since: running.begun });
   const moved = contentMoved(input, point, command.body);
   if (moved) return moved;
   return accept(

@@ -9,7 +9,8 @@ import { decideAssignPerson, decideChangeTerms, decideHandOver, decideNameDirect
 import { decidePresent, decideWithdraw } from './decide-present';
 import { decideAddPhoto, decideBeginAct, decideEndAct, decideRecord, decideSetPhotoAside } from './decide-record';
 import { decideConcede, decideRelease, decideReopen, decideSendBack } from './decide-release';
-import { planFaults } from './plan-faults';
+import { planRefused } from './plan-refused';
+import { withTrueSources } from './settings';
 import type { JobState } from './state';
 
 type Running = Exclude<CommandType, 'plan-job'>;
@@ -42,10 +43,10 @@ const deciders: { [T in Running]: Decider<T> } = {
 
 const planJob = (command: CommandOf<'plan-job'>, actor: JobActor, at: Times): Decision => {
   const { plan } = command.body;
-  const blockers = planFaults(plan, at.corrected.slice(0, 10)).filter((verdict) => verdict.kind === 'stop' && verdict.outcome === 'outside');
-  if (blockers.length > 0) return refuse('plan-not-workable', { blockers });
+  const unworkable = planRefused(plan, at);
+  if (unworkable) return unworkable;
   const stamp = { accountId: actor.accountId, name: actor.name, role: 'coordinator' as const };
-  return accept(event({ stamp, at, command }, 'job-planned', { plan, definitions: definitionsVersion }));
+  return accept(event({ stamp, at, command }, 'job-planned', { plan: { ...plan, terms: withTrueSources(plan.terms) }, definitions: definitionsVersion }));
 };
 
 /**

@@ -65,17 +65,19 @@ const roundOpened = (state: JobState, event: JobEventOf<'repair-round-opened'>):
 
 /** The head is cut off: everything so far stands as an earlier setting and the work begins again at point 1. */
 const settingBegun = (state: JobState, event: JobEventOf<'setting-begun'>): JobState => {
-  const { setting, head, targetHeightIn, reason, at } = event.body;
+  const { setting, head, targetHeightIn, reason, actor, at } = event.body;
+  const { points, site } = state;
+  const earlier = { setting: state.setting, reason, points, site, ended: { by: actor, at } };
   return {
     ...state,
     setting,
     rounds: [],
     plan: { ...state.plan, head, terms: { ...state.plan.terms, targetHeightIn } },
-    earlierSettings: [...state.earlierSettings, { setting: state.setting, reason, points: state.points }],
+    earlierSettings: [...state.earlierSettings, earlier],
+    site: {},
     points: openNext(sequenceOf(state.plan.procedure.passes.length, []).map(blankPoint), at),
     custody: Array.from({ length: head.ports }, (_, index) => ({ port: index + 1, out: false, where: null, holder: null, back: null })),
     headSet: false,
-    stopped: null,
   };
 };
 

@@ -2,7 +2,7 @@ import { flangeOf, odTolerance, qualificationContinuity, ratingsOf } from '../ca
 import { pressureLimitsOf, type PressureBound } from '../hold-points/pressure-limits';
 import type { Amount, LimitKind, Source, Verdict } from '../hold-points/verdict';
 import type { TextParam } from '../locales/text';
-import type { Role } from '../permissions/roles';
+import { onBothSides, type Role } from '../permissions/roles';
 import { toDecimal } from '../units/decimal';
 import { settingDefinitions } from './settings';
 import { settingNames, type JobPlan } from './plan';
@@ -102,7 +102,13 @@ const crewFaults = ({ people, procedure }: JobPlan, day: string): Verdict[] => {
         return one.process === process && continuity.ok && continuity.inForce;
       }),
     );
+  const bothSides = people.filter(
+    (person, index) =>
+      people.findIndex((one) => one.accountId === person.accountId) === index &&
+      onBothSides(people.filter((one) => one.accountId === person.accountId).map((one) => one.role)),
+  );
   return [
+    ...bothSides.map(({ name }) => fault({ limit: 'on-both-sides', kind: 'stop', about: ['people'], source: commonPractice, params: { name } })),
     ...needed
       .filter((role) => !people.some((person) => person.role === role))
       .map((role) => fault({ limit: `nobody-is-${role.replace('_', '-')}`, kind: 'stop', about: ['people'], source: commonPractice })),

@@ -1,6 +1,6 @@
 import type { PointPlace } from '../hold-points/points';
 import type { Times } from './actor';
-import type { Evidence, JobState, PointState } from './state';
+import type { ActRun, Evidence, JobState, PointState } from './state';
 
 export const noEvidence = (): Evidence => ({
   readings: {},
@@ -48,3 +48,7 @@ export const changePoint = (
 /** The point that is open or presented now; undefined when all are released. */
 export const currentPoint = (state: JobState): PointState | undefined =>
   state.points.find((point) => point.status === 'open' || point.status === 'presented');
+
+/** The act that burns or runs now; undefined while nothing does. */
+export const runningAct = (state: JobState): ActRun | undefined =>
+  currentPoint(state)?.acts.find((run) => run.ended === null);

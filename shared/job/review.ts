@@ -66,9 +66,17 @@ const missingOf = (point: PointState, context: PointContext, fields: PlacedField
 const sameBasis = (a: readonly string[], b: readonly string[]): boolean =>
   a.length === b.length && [...a].sort().join() === [...b].sort().join();
 
-/** Whether a concession still stands for this verdict: it binds one limit and the readings that it was judged on. */
-export const covers = (concession: Concession, verdict: Verdict): boolean =>
-  concession.limit === verdict.limit && sameBasis(concession.basis, verdict.basis);
+const sameJudgement = (a: Verdict, b: Verdict): boolean =>
+  a.measured?.value === b.measured?.value && a.allowed?.min === b.allowed?.min && a.allowed?.max === b.allowed?.max;
+
+/**
+ * Whether a concession still stands for this verdict: it binds the readings that it was judged on, what they came to,
+ * and one limit as it was then.
+ */
+export const covers = (concession: Pick<Concession, 'limit' | 'basis' | 'verdict'>, verdict: Verdict): boolean =>
+  concession.limit === verdict.limit &&
+  sameBasis(concession.basis, verdict.basis) &&
+  sameJudgement(concession.verdict, verdict);
 
 /** Judges a point by its evidence; no clock, so that the same content always gives the same review. */
 export const reviewPoint = (state: JobState, point: PointState): PointReview => {

@@ -1,5 +1,5 @@
 import type { Unit } from '../units/units';
-import type { Decimal, Settings, SettingName } from './plan';
+import type { Decimal, Settings, SettingName, Terms } from './plan';
 import { settingNames } from './plan';
 
 interface SettingDefinition {
@@ -48,4 +48,14 @@ export const settingsWith = (own: Partial<Record<SettingName, Decimal>>): Settin
     if (value !== undefined) settings[name] = { value, source: 'job' };
   }
   return settings;
+};
+
+/** No value but the default may go by the name of common practice: another one is the programme's, whoever typed it. */
+export const withTrueSources = (terms: Terms): Terms => {
+  const settings = { ...terms.settings };
+  for (const name of settingNames) {
+    const { value } = settings[name];
+    if (Number(value) !== Number(settingDefinitions[name].value)) settings[name] = { value, source: 'job' };
+  }
+  return { ...terms, settings };
 };

@@ -121,6 +121,15 @@ export interface Direction {
   at: Times;
 }
 
+export interface EarlierSetting {
+  setting: number;
+  reason: string;
+  points: PointState[];
+  /** readings of the site that it was done on; the next one reads the air anew */
+  site: Record<string, Reading[]>;
+  ended: { by: ActorStamp; at: Times };
+}
+
 /** A job as its events make it. Nothing here is stored; it is folded from the chain on every side. */
 export interface JobState {
   id: string;
@@ -133,7 +142,7 @@ export interface JobState {
   /** readings that belong to the site and not to one point: gas checks, permit, the look before resuming */
   site: Record<string, Reading[]>;
   /** points of settings whose head was cut off again */
-  earlierSettings: { setting: number; reason: string; points: PointState[] }[];
+  earlierSettings: EarlierSetting[];
   direction: Direction | null;
   proposedDirection: string | null;
   custody: Custody[];

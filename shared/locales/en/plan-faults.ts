@@ -10,6 +10,7 @@ export default {
   'flange-unknown': 'No flange of size {size} at {rating} stands in the table; it lists {known}. Check the nameplate.',
   'inside-pass-without-weld': 'The procedure has an inside pass and the head is welded outside only. Choose the other procedure or head.',
   'inside-weld-without-pass': 'The head is welded outside and inside and the procedure has no inside pass. Choose the other procedure or head.',
+  'on-both-sides': '{name} stands on both sides: a welder or coordinator is never a guest’s representative too. Choose somebody else for one of them.',
   'nobody-is-welder': 'No welder is on this job. Add one: the welder records.',
   'nobody-is-company-rep': 'No company representative is on this job. Add one: he releases.',
   'nobody-is-tool-pusher': 'No tool pusher is on this job. Add one: he names the valve’s direction and confirms it.',

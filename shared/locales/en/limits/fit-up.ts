@@ -8,7 +8,7 @@ export default {
   'direction-marked': {
     within: 'The direction is marked on head and casing.',
     outside:
-      'The direction is not marked on head and casing. Mark both before the lift: turning the head later rolls the seal.',
+      'The direction, as it was last named, is not marked on head and casing. Mark both before the lift: turning the head later rolls the seal.',
   },
   'seal-sound': {
     within: 'The seal was sound before setting.',

@@ -23,6 +23,15 @@ export default {
     outside:
       'A test plug is still in. Take it out before any heat: what is trapped behind it can crack the head and blow it out.',
   },
+  'plug-back-in': {
+    within: 'No plug is in port {port}.',
+    outside:
+      'The plug of port {port} was put back since. No heat while it is in: reopen the hold point of the test plug, take it out and record it again.',
+  },
+  'tacked-first': {
+    within: 'The head is tacked.',
+    outside: 'The head has not been tacked. Tack it, then read level, two-hole and height before the arc is struck.',
+  },
   'plug-custody': {
     within: 'The plug of port {port} is kept: {where}, held by {holder}.',
     outside: 'Nobody holds the plug of port {port}, or nobody knows where it is. Name the place and the person.',

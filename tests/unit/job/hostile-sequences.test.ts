@@ -1,0 +1,386 @@
+import { describe, expect, it } from 'vitest';
+import { concessionTotal } from '../../../shared/job/decide-failure';
+import { decide } from '../../../shared/job/decide';
+import { evolve } from '../../../shared/job/evolve';
+import { planFaults } from '../../../shared/job/plan-faults';
+import { reviewPoint } from '../../../shared/job/review';
+import { aPlan, coordinator, companyRep, helper, welder } from '../../support/a-plan';
+import { aJob, type TestJob } from '../../support/a-job';
+import { hash } from '../../support/a-job';
+import { cleanAir } from '../../support/clearance';
+import { presentPoint, recordPoint, releasePoint, walkPoint, walkTo } from '../../support/drive';
+
+const reason = 'Because it was so on site.';
+const at = (until: string, plan = aPlan()): TestJob => {
+  const job = aJob(plan);
+  walkTo(job, until);
+  return job;
+};
+const rep = (job: TestJob) => job.person('company_rep');
+const hand = (job: TestJob) => job.person('welder');
+const entry = (field: string, typed: string, unit: string | null = null) => ({ field, typed, unit, measuredBy: null });
+const reopen = (job: TestJob, point: string) => ({ point, reason, ...job.signing(point) });
+const freshAir = (job: TestJob): TestJob =>
+  job.do('record', { point: 'site', entries: [...cleanAir(), entry('gas.bump-tested', 'yes')] }, hand(job));
+/** The stops that a refusal lists; none when it was accepted. */
+const blockers = (decision: ReturnType<TestJob['try']>): string[] =>
+  decision.ok ? [] : decision.refusal.blockers.map((verdict) => verdict.limit);
+
+describe('while an act runs', () => {
+  const burning = (): TestJob => {
+    const job = freshAir(at('bevel-prep'));
+    return job.do('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job));
+  };
+
+  it('the same act is not begun again and its point is not presented', () => {
+    const job = burning();
+    expect(job.refused('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job))).toBe('act-running');
+    expect(reviewPoint(job.job, job.point('bevel-prep')).missing).toContain('act-end:bevel');
+    expect(job.refused('present', { point: 'bevel-prep', ...job.signing('bevel-prep') }, hand(job))).toBe(
+      'not-complete',
+    );
+  });
+
+  it('no earlier point is reopened under the flame', () => {
+    const job = burning();
+    expect(job.refused('reopen', reopen(job, 'final-cut'), rep(job))).toBe('act-running');
+    job.do('end-act', { point: 'bevel-prep', act: 'bevel' }, hand(job));
+    job.do('reopen', reopen(job, 'final-cut'), rep(job));
+    expect(job.point('bevel-prep').superseded).toHaveLength(1);
+  });
+
+  it('the head is not set again', () => {
+    const job = freshAir(at('preheat-reached'));
+    job.do('begin-act', { point: 'preheat-reached', act: 'preheat' }, hand(job));
+    const again = { reason, head: job.job.plan.head, targetHeightIn: '5', ...job.signingJob() };
+    expect(job.refused('set-again', again, rep(job))).toBe('act-running');
+  });
+
+  it('work may be stopped and the act ended, yet nothing is begun', () => {
+    const job = burning();
+    job.do('stop-work', { reason }, job.person('tool_pusher'));
+    job.do('end-act', { point: 'bevel-prep', act: 'bevel' }, hand(job));
+    expect(job.refused('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job))).toBe('work-stopped');
+  });
+});
+
+describe('before fire is lit', () => {
+  const light = (job: TestJob, minutes = 0, doubtMs: number | null = 200) => {
+    const time = new Date(job.now + minutes * 60_000).toISOString();
+    const times = { device: time, corrected: time, received: new Date(job.now).toISOString(), doubtMs };
+    return decide(job.job, job.command('begin-act', { point: 'final-cut', act: 'final-cut' }), hand(job), times, hash);
+  };
+
+  it('the clock is sure', () => {
+    const job = freshAir(at('final-cut'));
+    expect(blockers(light(job, 0, null))).toEqual(['act-clock']);
+    expect(blockers(light(job, 0, 120_001))).toEqual(['act-clock']);
+    expect(light(job, 0, 120_000).ok).toBe(true);
+  });
+
+  it('air that was read after the flame began does not count', () => {
+    const job = at('final-cut');
+    job.minutes(90);
+    freshAir(job);
+    expect(light(job, -60).ok).toBe(true);
+    expect(blockers(light(job, -20))).toContain('gas-fresh');
+    expect(light(job, 1).ok).toBe(true);
+  });
+
+  it('a site reading whose clock is in doubt stops it, also after point 1 was released', () => {
+    const job = freshAir(at('final-cut'));
+    const time = new Date(job.now).toISOString();
+    const times = { device: time, corrected: time, received: time, doubtMs: null };
+    const command = job.command('record', { point: 'site', entries: [entry('gas.cellar.oxygen', '20.9', 'pct')] });
+    const decision = decide(job.job, command, hand(job), times, hash);
+    if (!decision.ok) throw new Error(decision.refusal.code);
+    decision.events.forEach((event) => (job.state = evolve(job.id, job.state, event)));
+    expect(blockers(light(job))).toContain('gas-clock');
+  });
+
+  it.each([
+    ['a meter out of calibration', 'meter-old', 'calibration.gas.meter'],
+    ['a meter that is no gas meter', 'pyrometer-1', 'listed.gas.meter'],
+    ['a meter that nobody knows', 'my own', 'listed.gas.meter'],
+  ])('%s stops it', (_name, meter, limit) => {
+    const plan = aPlan();
+    const old = { ...plan.instruments[0]!, id: 'meter-old', calibratedUntil: '2026-09-13' };
+    const job = freshAir(at('final-cut', { ...plan, instruments: [...plan.instruments, old] }));
+    job.do('record', { point: 'site', entries: [entry('gas.meter', meter)] }, hand(job));
+    expect(blockers(light(job))).toContain(limit);
+  });
+
+  it('yesterday’s bump test stops it', () => {
+    const job = at('final-cut');
+    job.minutes(24 * 60);
+    const entries = [...cleanAir(), entry('permit.expires', new Date(job.now + 3_600_000).toISOString())];
+    job.do('record', { point: 'site', entries }, hand(job));
+    expect(blockers(light(job))).toEqual(['gas.bump-tested']);
+    job.do('record', { point: 'site', entries: [entry('gas.bump-tested', 'yes')] }, hand(job));
+    expect(light(job).ok).toBe(true);
+  });
+
+  it.each(['gas.bore.flammable', 'gas.cellar.h2s', 'gas.annulus.co'])('less than nothing of %s stops it', (field) => {
+    const job = freshAir(at('final-cut'));
+    job.do(
+      'record',
+      { point: 'site', entries: [entry(field, '-1', field.endsWith('flammable') ? 'pct' : 'ppm')] },
+      hand(job),
+    );
+    expect(blockers(light(job))).toEqual([`${field}.zeroed`]);
+  });
+});
+
+describe('a plug that the test put back', () => {
+  it('keeps fire off the joint until it is out again', () => {
+    const job = at('pressure-test-held');
+    recordPoint(job, 'pressure-test-held');
+    expect(job.job.custody[0]).toMatchObject({ out: false, back: 'same' });
+    job.do('reopen', reopen(job, 'pass-4-inspected'), rep(job));
+    freshAir(job);
+    const struck = job.try('begin-act', { point: 'pass-4-inspected', act: 'pass' }, hand(job));
+    expect(blockers(struck)).toContain('plug.1.back-in');
+    job.do('reopen', reopen(job, 'test-plug-removed'), rep(job));
+    expect(job.refused('present', { point: 'test-plug-removed', ...job.signing('test-plug-removed') }, hand(job))).toBe(
+      'outside-stop',
+    );
+    job.do('record', { point: 'test-plug-removed', entries: [entry('plug.1.out', 'yes')] }, hand(job));
+    job.do('present', { point: 'test-plug-removed', ...job.signing('test-plug-removed') }, hand(job));
+    releasePoint(job, 'test-plug-removed');
+    freshAir(job);
+    expect(job.try('begin-act', { point: 'preheat-reached', act: 'preheat' }, hand(job)).ok).toBe(true);
+  });
+});
+
+describe('the root pass', () => {
+  it('is not struck before the head is tacked', () => {
+    const job = freshAir(at('pass-1-inspected'));
+    expect(blockers(job.try('begin-act', { point: 'pass-1-inspected', act: 'pass' }, hand(job)))).toContain(
+      'tacked-first',
+    );
+  });
+});
+
+describe('a direction', () => {
+  it('that is named again is marked again before the lift', () => {
+    const job = at('seal-greased-and-checked');
+    job.do('name-direction', { direction: 'mud-tanks', words: null }, job.person('tool_pusher')).minutes(1);
+    const marked = entry('direction-marked', 'yes');
+    job
+      .do('record', { point: 'seal-greased-and-checked', entries: [marked, entry('seal.sound', 'yes')] }, hand(job))
+      .minutes(1);
+    job.do('name-direction', { direction: 'doghouse', words: null }, job.person('tool_pusher')).minutes(1);
+    const lift = { point: 'seal-greased-and-checked', act: 'set-head' };
+    expect(blockers(job.try('begin-act', lift, hand(job)))).toEqual(['direction-marked']);
+    job.do('record', { point: 'seal-greased-and-checked', entries: [marked] }, hand(job));
+    job.do('begin-act', lift, hand(job));
+  });
+
+  it('that is none of the known ones comes in words', () => {
+    const job = aJob();
+    const name = (words: string | null) => ({ direction: 'other' as const, words });
+    expect(job.refused('name-direction', name(null), job.person('tool_pusher'))).toBe('direction-without-words');
+    job.do('name-direction', name('water tank'), job.person('tool_pusher'));
+  });
+});
+
+describe('a concession', () => {
+  const lowCut = { 'cut.12': '24.1', 'cut.3': '24.1', 'cut.6': '24.1', 'cut.9': '24.1' };
+  const presented = (): TestJob => {
+    const job = at('final-cut');
+    const mark = Number(reviewPoint(job.job, job.point('final-cut')).computed.find((one) => one.key === 'mark')?.value);
+    recordPoint(job, 'final-cut', Object.fromEntries(Object.keys(lowCut).map((key) => [key, String(mark + 0.125)])));
+    presentPoint(job, 'final-cut');
+    return job;
+  };
+  const items = (job: TestJob) =>
+    reviewPoint(job.job, job.point('final-cut')).unconceded.map(({ limit, basis }) => ({ limit, basis, reason }));
+  const concede = (job: TestJob, own = items(job)) => ({ point: 'final-cut', items: own, ...job.signing('final-cut') });
+
+  it('is given once', () => {
+    const job = presented();
+    const twice = items(job);
+    expect(job.refused('concede', concede(job, [...twice, ...twice]), rep(job))).toBe('nothing-to-concede');
+    job.do('concede', concede(job), rep(job));
+    expect(job.refused('concede', concede(job, twice), rep(job))).toBe('nothing-to-concede');
+    expect(concessionTotal(job.job)).toBe(1);
+  });
+
+  it('is void and not counted once it was read again', () => {
+    const job = presented();
+    job.do('concede', concede(job), rep(job));
+    job.do('withdraw', { point: 'final-cut', reason: null }, hand(job)).minutes(1);
+    const again = job.point('final-cut').readings['cut.12']!.at(-1)!.value;
+    job.do('record', { point: 'final-cut', entries: [entry('cut.12', again, 'in')] }, hand(job));
+    expect(concessionTotal(job.job)).toBe(0);
+    presentPoint(job, 'final-cut');
+    releasePoint(job, 'final-cut');
+    expect(concessionTotal(job.job)).toBe(1);
+    expect(job.point('final-cut').concessions).toHaveLength(2);
+  });
+
+  it('is void when the limit itself has moved', () => {
+    const job = presented();
+    job.do('concede', concede(job), rep(job));
+    const { terms } = job.job.plan;
+    const tighter = {
+      ...terms,
+      settings: { ...terms.settings, cutLowIn: { value: '0.03125', source: 'job' as const } },
+    };
+    job.do('change-terms', { terms: tighter, reason, ...job.signingJob() }, rep(job));
+    const release = { point: 'final-cut', statements: [], ...job.signing('final-cut') };
+    expect(job.refused('release', release, rep(job))).toBe('outside-hold');
+  });
+});
+
+describe('terms', () => {
+  const changed = (job: TestJob, own: object) => ({
+    terms: { ...job.job.plan.terms, ...own },
+    reason,
+    ...job.signingJob(),
+  });
+
+  it('that cannot work are not put in force', () => {
+    const job = aJob();
+    const test = { ...job.job.plan.terms.test, pressurePsi: 2900 };
+    expect(job.refused('change-terms', changed(job, { test }), rep(job))).toBe('plan-not-workable');
+    const settings = { ...job.job.plan.terms.settings, gasFreshMin: { value: '9999', source: 'job' as const } };
+    expect(job.refused('change-terms', changed(job, { settings }), rep(job))).toBe('plan-not-workable');
+  });
+
+  it('do not pass for common practice with another value', () => {
+    const job = aJob();
+    const settings = {
+      ...job.job.plan.terms.settings,
+      rotationDeg: { value: '2', source: 'common-practice' as const },
+    };
+    job.do('change-terms', changed(job, { settings }), rep(job));
+    expect(job.job.plan.terms.settings.rotationDeg).toEqual({ value: '2', source: 'job' });
+  });
+
+  it('that change while a point is presented are not released unseen', () => {
+    const job = at('final-cut');
+    recordPoint(job, 'final-cut');
+    presentPoint(job, 'final-cut');
+    const seen = job.signing('final-cut');
+    const settings = { ...job.job.plan.terms.settings, cutSpreadIn: { value: '0.02', source: 'job' as const } };
+    job.do('change-terms', changed(job, { settings }), rep(job));
+    expect(job.refused('release', { point: 'final-cut', statements: [], ...seen }, rep(job))).toBe('content-changed');
+  });
+});
+
+describe('a head that is set again', () => {
+  const again = (job: TestJob, own = {}) => ({
+    reason,
+    head: { ...job.job.plan.head, ...own },
+    targetHeightIn: '5',
+    ...job.signingJob(),
+  });
+
+  it('has to fit the casing and the procedure', () => {
+    const job = at('test-plug-removed');
+    expect(job.refused('set-again', again(job, { casingOdIn: '13.375' }), rep(job))).toBe('plan-not-workable');
+  });
+
+  it('leaves work stopped and the old air behind', () => {
+    const job = at('test-plug-removed');
+    job.do('stop-work', { reason }, hand(job));
+    job.do('set-again', again(job), rep(job));
+    expect(job.job.stopped).not.toBeNull();
+    expect(job.job.site).toEqual({});
+    expect(job.job.earlierSettings[0]?.site['gas.cellar.oxygen']).toHaveLength(1);
+    job.do('resume-work', { note: reason, ...job.signingJob() }, rep(job));
+    walkPoint(job, 'hot-work-clearance');
+  });
+
+  it('takes nothing that was captured for the first setting', () => {
+    const job = at('test-plug-removed').minutes(10);
+    job.do('set-again', again(job), rep(job));
+    job.minutes(-5);
+    const entries = [entry('fire-watch', 'P. Lind')];
+    expect(job.refused('record', { point: 'hot-work-clearance', entries }, hand(job))).toBe('of-earlier-setting');
+    job.minutes(6).do('record', { point: 'hot-work-clearance', entries }, hand(job));
+  });
+});
+
+describe('a repair round', () => {
+  it('is gone when a point before it is reopened, and the next one has a new name', () => {
+    const job = at('pressure-test-held');
+    job.do('open-repair-round', { reason, passes: 1 }, rep(job));
+    walkPoint(job, 'test-plug-removed-r1');
+    expect(job.refused('record', { point: 'pressure-test-held', entries: [entry('leak', 'none')] }, hand(job))).toBe(
+      'point-shut',
+    );
+    job.do('reopen', reopen(job, 'pass-4-inspected'), rep(job));
+    expect(job.point('pressure-test-held').carriedInto).toBeNull();
+    expect(
+      job.refused('record', { point: 'preheat-reached-r1', entries: [entry('joint-dry', 'yes')] }, hand(job)),
+    ).toBe('point-shut');
+    walkTo(job, 'pressure-test-held');
+    job.do('open-repair-round', { reason, passes: 1 }, rep(job));
+    expect(job.job.points.find((point) => point.status === 'open')?.place.id).toBe('test-plug-removed-r2');
+    walkTo(job, null);
+    job.do('seal', { concessions: concessionTotal(job.job), ...job.signingJob() }, rep(job));
+  });
+});
+
+describe('a stop while a point is presented', () => {
+  it('holds the release until work is resumed on fresh air, and on a hot joint on fresh heat and a look', () => {
+    const job = at('pass-2-inspected');
+    recordPoint(job, 'pass-2-inspected');
+    presentPoint(job, 'pass-2-inspected');
+    job.do('stop-work', { reason }, job.person('tool_pusher'));
+    const release = () => ({ point: 'pass-2-inspected', statements: [], ...job.signing('pass-2-inspected') });
+    expect(job.refused('release', release(), rep(job))).toBe('work-stopped');
+    job.minutes(70);
+    const resume = () => ({ note: reason, ...job.signingJob() });
+    expect(blockers(job.try('resume-work', resume(), rep(job))).sort()).toEqual([
+      'gas-fresh',
+      'resume-cracks',
+      'resume-preheat',
+    ]);
+    freshAir(job);
+    job.do(
+      'record',
+      { point: 'site', entries: [entry('resume.temperature', '300', 'degF'), entry('resume.cracks', 'none')] },
+      hand(job),
+    );
+    job.do('resume-work', resume(), rep(job));
+    releasePoint(job, 'pass-2-inspected');
+  });
+});
+
+describe('people', () => {
+  it('stand on one side of a job', () => {
+    const job = aJob();
+    const person = (account: typeof welder, role: 'welder' | 'company_rep' | 'coordinator') => ({
+      person: { ...account, role, qualifications: [] },
+    });
+    const office = { ...coordinator, roles: ['coordinator' as const] };
+    expect(job.refused('assign-person', person(welder, 'company_rep'), office)).toBe('roles-not-together');
+    expect(job.refused('assign-person', person(companyRep, 'welder'), office)).toBe('roles-not-together');
+    job.do('assign-person', person(coordinator, 'welder'), office);
+    const plan = aPlan();
+    const both = { ...plan, people: [...plan.people, { ...welder, role: 'tool_pusher' as const, qualifications: [] }] };
+    expect(planFaults(both, '2026-09-14').map((fault) => fault.limit)).toContain('on-both-sides');
+  });
+
+  it('may be welder and coordinator in one, and are qualified as the welder that they are', () => {
+    const plan = aPlan();
+    const people = [{ ...welder, role: 'coordinator' as const, qualifications: [] }, ...plan.people];
+    const job = aJob({ ...plan, people });
+    walkTo(job, null);
+    expect(job.job.points.every((point) => point.status === 'released')).toBe(true);
+  });
+
+  it('measure under the name that the job knows, and only when they are on it', () => {
+    const job = aJob();
+    const by = (accountId: string) => ({
+      point: 'hot-work-clearance',
+      entries: [{ ...entry('fire-watch', 'P. Lind'), measuredBy: { accountId, name: 'Somebody Else' } }],
+    });
+    expect(job.refused('record', by('0b1f6c1e-3c5a-4d1f-9a51-6a0c9a3f1fff'), hand(job))).toBe('measurer-not-on-job');
+    job.do('record', by(helper.accountId), hand(job));
+    expect(job.point('hot-work-clearance').readings['fire-watch']?.[0]?.measuredBy).toEqual(helper);
+  });
+});
