@@ -10,6 +10,8 @@ export type Step =
   | { kind: 'end-act'; act: string }
   | { kind: 'measure-again'; field: string }
   | { kind: 'present'; outside: number }
+  /** something of the site stands in the way: the air has grown old, the permit has run out */
+  | { kind: 'site'; what: 'air' | 'permit' }
   | { kind: 'blocked' };
 
 export interface Steps {
@@ -36,8 +38,19 @@ const evidenceStep = (review: PointReview): Step | null => {
   return shot === undefined ? null : { kind: 'shot', shot: shot.slice('shot:'.length) };
 };
 
-const fieldThatHolds = (review: PointReview, verdicts: readonly Verdict[]): string | undefined =>
-  verdicts.flatMap((verdict) => verdict.about).find((key) => review.fields.some((field) => field.key === key));
+/** The field of this point that such a verdict waits for: one that is not there yet, else the oldest reading. */
+const fieldThatHolds = (review: PointReview, verdicts: readonly Verdict[]): string | undefined => {
+  const readAt = (key: string): string => review.context.read(key)?.at.corrected ?? '';
+  const here = (key: string): boolean => review.fields.some((field) => field.key === key);
+  const found = verdicts.map((verdict) => verdict.about.filter(here)).find((keys) => keys.length > 0);
+  return found?.sort((a, b) => readAt(a).localeCompare(readAt(b)))[0];
+};
+
+const siteThatHolds = (verdicts: readonly Verdict[]): 'air' | 'permit' | undefined => {
+  const about = verdicts.flatMap((verdict) => verdict.about);
+  if (about.some((key) => key.startsWith('gas.'))) return 'air';
+  return about.some((key) => key.startsWith('permit.')) ? 'permit' : undefined;
+};
 
 /**
  * What comes next at an open point. Work that runs is ended first; work that must be done begins as soon as nothing
@@ -53,8 +66,9 @@ export const nextSteps = (review: PointReview, point: PointState, judgeBegin: Ju
     if (stops.length === 0) return { main: { kind: 'begin-act', act }, other: evidence };
     // What stands in the way and can be read here comes before everything else.
     const key = fieldThatHolds(review, stops);
-    if (key !== undefined && (evidence === null || review.missing.includes(`field:${key}`)))
-      return { main: { kind: 'field', field: key }, other: null };
+    if (key !== undefined) return { main: { kind: 'field', field: key }, other: null };
+    const what = siteThatHolds(stops);
+    if (what !== undefined) return { main: { kind: 'site', what }, other: evidence };
   }
   if (evidence) return { main: evidence, other: null };
   if (act !== undefined) return { main: { kind: 'blocked' }, other: null };

@@ -23,7 +23,11 @@ const earlier = [
   },
 ];
 
-const at = (spec: { readings?: ReadingSpecs; acts?: (typeof gone | { act: string; begun: string })[]; photos?: boolean }) => {
+const at = (spec: {
+  readings?: ReadingSpecs;
+  acts?: (typeof gone | { act: string; begun: string })[];
+  photos?: boolean;
+}) => {
   const { state, point } = aPointContext({ kind: 'final-cut', earlier, readings: spec.readings, acts: spec.acts });
   const photo = (shot: string) => ({ shot, setAside: null, late: false }) as never;
   const shown = spec.photos ? { ...point, photos: ['wraparound-on-mark', 'finished-cut'].map(photo) } : point;
@@ -42,12 +46,28 @@ describe('the next step at an open point', () => {
     });
   });
 
-  it('goes on with the readings while the work may not begin', () => {
+  it('reads the air again when it has grown too old for fire, with the first reading beside it', () => {
     const { review, point } = at({});
-    expect(nextSteps(review, point, () => [stop(['gas.cellar.oxygen'])]).main).toEqual({
-      kind: 'field',
-      field: 'fluid.below-weld',
+    expect(nextSteps(review, point, () => [stop(['gas.cellar.oxygen'])])).toEqual({
+      main: { kind: 'site', what: 'air' },
+      other: { kind: 'field', field: 'fluid.below-weld' },
     });
+  });
+
+  it('goes on with the readings while something else keeps the work from beginning', () => {
+    const { review, point } = at({});
+    expect(nextSteps(review, point, () => [stop([])]).main).toEqual({ kind: 'field', field: 'fluid.below-weld' });
+  });
+
+  it('takes the older of two readings again that have both grown too old', () => {
+    const { review, point } = at({
+      readings: {
+        'cut.12': { value: 8, at: '2026-09-14T11:10:00.000Z' },
+        'cut.3': { value: 8, at: '2026-09-14T11:00:00.000Z' },
+      },
+    });
+    const main = nextSteps(review, point, () => [stop(['cut.12', 'cut.3'])]).main;
+    expect(main).toEqual({ kind: 'field', field: 'cut.3' });
   });
 
   it('asks first for the missing reading that keeps the work from beginning', () => {

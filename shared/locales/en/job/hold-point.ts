@@ -54,6 +54,7 @@ export default {
   next: {
     field: '{label}',
     photo: 'Photo: {label}',
+    readAgain: 'Again: {label}',
     begin: 'Begin: {label}',
     end: 'End: {label}',
     endAfter: 'End: {label}, {time}',
@@ -130,7 +131,7 @@ export default {
     ownEvidence: 'You recorded or measured some of this, so somebody else must release it.',
     statements: 'With the release you state',
     release: 'Release',
-    releaseFaces: 'Release: it faces the {direction}',
+    releaseFaces: 'Release: it faces {direction}',
     sendBack: 'Send back',
     sendBackReason: 'What has to be done again, and why',
     concede: { one: 'Concede it, with a reason', other: 'Concede {count}, with reasons' },

@@ -16,7 +16,7 @@ export default {
     head: 'Head',
     casing: 'Casing',
     casingIs: '{od}, {weight} lb/ft, {grade}',
-    headIs: '{name}, {size} in {rating}',
+    headIs: '{size} in, {rating}',
     procedure: 'Procedure',
     passes: { one: '{number}, 1 pass', other: '{number}, {count} passes' },
     test: 'Pressure test',
