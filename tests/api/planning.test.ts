@@ -171,3 +171,48 @@ describe('the times of a command', () => {
     });
   });
 });
+
+describe('what a caller claims', () => {
+  it('of a name gives way to the name of the account', async () => {
+    const job = await aJobOn(on);
+    const measuredBy = { accountId: on.person('secondWelder').id, name: 'O. Brandt' };
+    const entries = [{ field: 'gas.bore.co', typed: '3', unit: 'ppm', measuredBy }];
+    await job.do('welder', 'record', { point: 'hot-work-clearance', entries });
+    expect(job.state.site['gas.bore.co']?.at(-1)?.measuredBy).toEqual({ ...measuredBy, name: 'L. Amaro' });
+  });
+
+  it('of an account that does not exist is refused', async () => {
+    const measuredBy = { accountId: nobody, name: 'Nobody' };
+    const entries = [{ field: 'gas.bore.co', typed: '3', unit: 'ppm', measuredBy }];
+    const answer = await (await aJobOn(on)).send('welder', 'record', { point: 'hot-work-clearance', entries });
+    expect([answer.status, answer.body.code]).toEqual([422, 'command.person-unknown']);
+  });
+
+  it("of a changed setting does not make it common practice: it is the operator's", async () => {
+    const job = await aJobOn(on);
+    const { terms } = job.state.plan;
+    const settings = { ...terms.settings, tiltDeg: { value: '0.4', source: 'common-practice' as const } };
+    await job.do('companyRep', 'change-terms', {
+      terms: { ...terms, settings },
+      reason: 'Programme rev 2',
+      ...job.signingJob(),
+    });
+    expect(job.state.plan.terms.settings.tiltDeg).toEqual({ value: '0.4', source: 'job' });
+    expect(job.state.plan.terms.settings.touchF.source).toBe('common-practice');
+  });
+
+  it('of a head gives way to the head of the set-up', async () => {
+    const job = await (await aJobOn(on)).walkTo('valve-orientation');
+    const head = { ...job.state.plan.head, faceToShoulderIn: '99', ratedPressurePsi: 15000 };
+    await job.do('companyRep', 'set-again', { reason: 'Seal rolled', head, targetHeightIn: '5', ...job.signingJob() });
+    expect(job.state.plan.head).toMatchObject({ faceToShoulderIn: '14', ratedPressurePsi: 3000 });
+    const unknown = { ...head, id: nobody };
+    const answer = await job.send('companyRep', 'set-again', {
+      reason: 'Again',
+      head: unknown,
+      targetHeightIn: '5',
+      ...job.signingJob(),
+    });
+    expect([answer.status, answer.body.code]).toEqual([422, 'command.head-unknown']);
+  });
+});

@@ -8,6 +8,7 @@ import { aPlanning } from '../support/a-planning';
 import type { JobOn } from '../support/a-job-on';
 import { startTestApp } from '../support/test-app';
 import type { TestApp } from '../support/test-app';
+import { hours } from '../support/test-clock';
 
 let on: TestApp;
 let job: JobOn;
@@ -170,5 +171,28 @@ describe('text that cannot be kept', () => {
     const agent = await browserOf(on, 'welder');
     const answer = await agent.post(`/api/jobs/${job.id}/commands`).set('Content-Type', 'application/json').send(body);
     expect([answer.status, answer.body.code]).toEqual([422, 'command.text-broken']);
+  });
+});
+
+// The last one: a night passes, and whoever did nothing in it is signed out.
+describe('signing through a long night', () => {
+  it('takes password and PIN when the password lies twelve hours back, and after that the PIN alone', async () => {
+    const own = await aJobOn(on);
+    await own.fill();
+    const rep = await browserOf(on, 'companyRep');
+    for (let hour = 0; hour < 13; hour += 1) {
+      on.clock.advance(hours(1));
+      await rep.get('/api/session').expect(200);
+    }
+    const stop = own.command('stop-work', { reason: 'Long night' });
+    await own.post('companyRep', stop);
+    const { pin, password } = on.person('companyRep');
+    const terms = () =>
+      own.command('change-terms', { terms: own.state.plan.terms, reason: 'Read again', ...own.signingJob() });
+    const command = terms();
+    const alone = await own.post('companyRep', command, { pin });
+    expect([alone.status, alone.body.code]).toEqual([403, 'signing.password-needed']);
+    expect((await own.post('companyRep', command, { pin, password })).status).toBe(200);
+    expect((await own.post('companyRep', terms(), { pin })).status).toBe(200);
   });
 });
