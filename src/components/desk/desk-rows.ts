@@ -19,6 +19,35 @@ const outsideFirst = (one: Verdict, other: Verdict): number =>
 const isShownAt = (verdict: Verdict, key: string): boolean =>
   verdict.about[0] === key || (verdict.outcome === 'outside' && verdict.about.includes(key));
 
+/** The other end of the same range: both within, one from below and one from above, by the same source. */
+const isOtherEnd = (one: Verdict, other: Verdict): boolean =>
+  one.outcome === 'within' &&
+  other.outcome === 'within' &&
+  one.allowed !== null &&
+  other.allowed !== null &&
+  one.allowed.unit === other.allowed.unit &&
+  one.source.kind === other.source.kind &&
+  one.source.ref === other.source.ref &&
+  (one.allowed.min === null) !== (other.allowed.min === null) &&
+  (one.allowed.max === null) !== (other.allowed.max === null);
+
+const asRange = (one: Verdict, other: Verdict): Verdict => ({
+  ...one,
+  allowed: {
+    min: one.allowed?.min ?? other.allowed?.min ?? null,
+    max: one.allowed?.max ?? other.allowed?.max ?? null,
+    unit: one.allowed?.unit ?? '',
+  },
+});
+
+/** Two verdicts that are the ends of one range stand in one line, as the procedure writes it. */
+export const inRanges = (verdicts: readonly Verdict[]): Verdict[] =>
+  verdicts.reduce<Verdict[]>((lines, verdict) => {
+    const at = lines.findIndex((line) => isOtherEnd(line, verdict));
+    const line = lines[at];
+    return line === undefined ? [...lines, verdict] : lines.with(at, asRange(line, verdict));
+  }, []);
+
 /** What was read at a point, group by group, each reading with its verdicts; groups with something outside come first. */
 export function deskGroups(review: PointReview): DeskGroup[] {
   const groups = review.groups.map((group) => ({
@@ -27,7 +56,7 @@ export function deskGroups(review: PointReview): DeskGroup[] {
       .filter((field) => field.group === group.key && review.context.read(field.key) !== undefined)
       .map((field) => ({
         field,
-        verdicts: review.verdicts.filter((verdict) => isShownAt(verdict, field.key)).sort(outsideFirst),
+        verdicts: inRanges(review.verdicts.filter((verdict) => isShownAt(verdict, field.key))).sort(outsideFirst),
       })),
   }));
   const isOut = ({ readings }: DeskGroup) =>

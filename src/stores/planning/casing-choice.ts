@@ -38,6 +38,8 @@ export interface OwnCasingRead {
   readonly fields: Readonly<Record<keyof OwnCasing, TypedNumber>>;
   /** by the formulas, from diameter, wall and grade; null while one of them is missing or unknown */
   readonly worked: { readonly collapsePsi: number; readonly internalYieldPsi: number } | null;
+  /** diameter and wall leave a bore that a mandrel can pass */
+  readonly bored: boolean;
   readonly casing: Casing | null;
 }
 
@@ -75,10 +77,11 @@ export function readOwnCasing(own: OwnCasing, system: UnitSystem): OwnCasingRead
   const typedRatings = fields.collapsePsi.is === 'read' || fields.internalYieldPsi.is === 'read';
   const source = own.source.trim() || (typedRatings || worked === null ? '' : casingCollapseInfo.source);
   if (!bore?.ok || weight === null || !collapsePsi || !yieldPsi || own.grade.trim() === '' || source === '')
-    return { fields, worked, casing: null };
+    return { fields, worked, bored: bore?.ok === true, casing: null };
   return {
     fields,
     worked,
+    bored: true,
     casing: {
       odIn: toDecimal(odIn ?? 0),
       weightLbFt: toDecimal(weight),

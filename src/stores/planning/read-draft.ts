@@ -60,18 +60,21 @@ function readSettings({ ownSettings, units }: PlanDraft): {
 
 const ownCasingFaults = (own: OwnCasingRead | null): FormFault[] => {
   if (own === null) return [];
-  const { fields, worked, casing } = own;
+  const { fields, worked, bored, casing } = own;
   const rated = worked !== null;
   const faults = [
-    ...lacks('casing.odIn', fields.odIn),
-    ...lacks('casing.weightLbFt', fields.weightLbFt),
-    ...lacks('casing.wallIn', fields.wallIn),
-    ...lacks('casing.grade', fields.grade),
-    ...lacks('casing.collapsePsi', fields.collapsePsi, rated),
-    ...lacks('casing.internalYieldPsi', fields.internalYieldPsi, rated),
-    ...lacks('casing.source', fields.source, casing !== null || rated),
+    ...lacks('ownCasing.odIn', fields.odIn),
+    ...lacks('ownCasing.weightLbFt', fields.weightLbFt),
+    ...lacks('ownCasing.wallIn', fields.wallIn),
+    ...lacks('ownCasing.grade', fields.grade),
+    ...lacks('ownCasing.collapsePsi', fields.collapsePsi, rated),
+    ...lacks('ownCasing.internalYieldPsi', fields.internalYieldPsi, rated),
+    ...lacks('ownCasing.source', fields.source, casing !== null || rated),
   ];
-  return faults.length > 0 || casing !== null ? faults : [missing('casing.source')];
+  if (faults.length > 0 || casing !== null) return faults;
+  const field = bored ? 'ownCasing.source' : 'ownCasing.wallIn';
+  const text = { key: bored ? `plan.need.${field}` : 'plan.need.ownCasing.bore' };
+  return [{ field, kind: bored ? 'missing' : 'stop', text, source: null }];
 };
 
 const asFault = ({ about, kind, text, source }: Verdict): FormFault => ({ field: about[0] ?? '', kind, text, source });
