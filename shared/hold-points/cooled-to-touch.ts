@@ -5,6 +5,7 @@ import { coolingFitOf, coolingPointsOf } from './cooling';
 import type { GroupDefinition, PointDefinition } from './definition';
 import { choice, quantity, time } from './fields';
 import { judgeLook, lookGroups } from './imperfections';
+import { namedInstrument } from './instruments';
 import { byProcedure, bySetting, commonPractice, judgeFact, judgeRange } from './judging';
 import { computeOrientation, judgeOrientation, orientationGroups } from './orientation';
 import type { Verdict } from './verdict';
@@ -21,6 +22,7 @@ const groups = (context: PointContext): GroupDefinition[] => [
   {
     key: 'cover',
     fields: [
+      ...namedInstrument(context, 'cooled-instrument', 'pyrometer', false),
       quantity('ambient', 'degF', { likely: { min: -40, max: 120 } }),
       choice('covered', ['covered', 'wrapped', 'open']),
       time('cover-off', { required: false }),

@@ -4,6 +4,7 @@ import type { PointContext } from './context';
 import type { FieldDefinition } from './definition';
 import { judgeInstrument } from './instruments';
 import { commonPractice, judgeFact } from './judging';
+import { judgeUsable } from './unusable';
 import type { Verdict } from './verdict';
 
 /** Readings whose time is not sure are a hold; the air's own are a stop and judged with the air. */
@@ -22,6 +23,14 @@ const judgeClock = (context: PointContext, fields: FieldDefinition[]): Verdict[]
         holds: false,
       });
 };
+
+/** Colder than any rig has been, °F: a slip of the finger, and the limits that only say `no hotter than` would take it. */
+const coldestF = -100;
+
+const judgePossible = (context: PointContext, fields: FieldDefinition[]): Verdict[] =>
+  fields
+    .filter(({ of }) => of.type === 'quantity' && of.unit === 'degF')
+    .flatMap(({ key }) => judgeUsable(context, `${key}.possible`, [key], (context.number(key) ?? 0) >= coldestF));
 
 /** An act that ends before it began by more than two clocks may differ, in minutes. */
 const clocksDifferMin = 4;
@@ -49,6 +58,7 @@ const judgeActTimes = (context: PointContext): Verdict[] =>
 /** What is judged the same way at every point: instruments, clocks, and what an act's beginning found. */
 export const generalVerdicts = (context: PointContext, fields: FieldDefinition[]): Verdict[] => [
   ...fields.filter((field) => field.of.type === 'instrument').flatMap((field) => judgeInstrument(context, field)),
+  ...judgePossible(context, fields),
   ...judgeClock(context, fields),
   ...judgeActTimes(context),
   ...context.point.acts.flatMap((run, index) =>

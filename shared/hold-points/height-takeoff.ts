@@ -9,6 +9,7 @@ import { computed } from './computing';
 import type { PointContext } from './context';
 import type { GroupDefinition, PointDefinition } from './definition';
 import { quantity } from './fields';
+import { namedInstrument } from './instruments';
 import { bySetting, commonPractice, judgeFact, judgeRange } from './judging';
 import { judgeNameplate, nameplateGroup } from './nameplate';
 import { restingOn } from './resting-on';
@@ -29,8 +30,10 @@ const groups = (context: PointContext): GroupDefinition[] => {
   const { base, drawingIn } = measuredOnHead(context.state.plan);
   const found = takeoffOf(context);
   const above = found?.stringHeightIn === undefined ? undefined : found.lowestCutFromStringIn;
+  const tapes = ['first', 'second'].flatMap((hand) => namedInstrument(context, `tape.${hand}`, 'tape'));
   return [
     nameplateGroup(context),
+    ...(tapes.length > 0 ? [{ key: 'tapes', fields: tapes }] : []),
     { key: base, fields: twoPersonFields(base, 'in', around(drawingIn, 1)) },
     stringGroup(context),
     { key: 'mark', fields: twoPersonFields('mark', 'in', around(found?.markIn, 1)) },

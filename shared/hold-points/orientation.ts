@@ -5,6 +5,7 @@ import { answer, computed } from './computing';
 import type { PointContext } from './context';
 import type { GroupDefinition } from './definition';
 import { quantity, words } from './fields';
+import { namedInstrument } from './instruments';
 import { bySetting, judgeRange } from './judging';
 import { judgeUsable } from './unusable';
 import type { Computed, Verdict } from './verdict';
@@ -42,7 +43,10 @@ export const orientationGroups = (context: PointContext, prefix: OrientationPref
     },
     {
       key: `${prefix}-level`,
-      fields: levelFields(prefix).map((field) => quantity(field, 'deg', { likely: { min: -2, max: 2 } })),
+      fields: [
+        ...levelFields(prefix).map((field) => quantity(field, 'deg', { likely: { min: -2, max: 2 } })),
+        ...namedInstrument(context, `${prefix}.instrument`, 'level'),
+      ],
     },
     {
       key: `${prefix}-height`,

@@ -3,6 +3,7 @@ import type { ProcedurePass } from '../job/plan';
 import type { PointContext } from './context';
 import type { GroupDefinition } from './definition';
 import { quantity } from './fields';
+import { namedInstrument } from './instruments';
 import { byProcedure, bySetting, judgeFact, judgeRange } from './judging';
 import type { Verdict } from './verdict';
 
@@ -18,7 +19,14 @@ export const passTemperatureGroup = (context: PointContext): GroupDefinition => 
   const likely = pass && {
     likely: { min: lowestAllowedF(context, pass) - 100, max: Number(pass.interpassF.max) + 100 },
   };
-  return { key: 'temps', fields: passTemperatureFields.map((field) => quantity(field, 'degF', likely ?? {})) };
+  return {
+    key: 'temps',
+    fields: [
+      ...passTemperatureFields.map((field) => quantity(field, 'degF', likely ?? {})),
+      // a temperature-indicating stick is no instrument of the list
+      ...namedInstrument(context, 'temps.instrument', 'pyrometer', false),
+    ],
+  };
 };
 
 const judgeCold = (context: PointContext, pass: ProcedurePass): Verdict[] =>

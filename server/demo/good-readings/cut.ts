@@ -2,7 +2,7 @@ import type { PointContext } from '../../../shared/hold-points/context';
 import { quarters } from '../../../shared/hold-points/fields';
 import { measuredOnHead, takeoffOf } from '../../../shared/hold-points/takeoff-of';
 import { toDecimal } from '../../../shared/units/decimal';
-import { middle, type Answers } from './answers';
+import { instrumentOf, middle, type Answers } from './answers';
 
 /** Height of the string above ground at both stakes. */
 const stringIn = 24;
@@ -16,7 +16,7 @@ const twice = (base: string, value: number): Record<string, string> => ({
 /** From the string down to where the casing is to be cut, by the string as it stands in these readings. */
 const markIn = (context: PointContext): number => stringIn - (takeoffOf(context)?.cutElevationIn ?? 0);
 
-export const goodTakeoff: Answers = (context) => {
+export const goodTakeoff: Answers = (context, at) => {
   const { head, terms } = context.state.plan;
   const { base, drawingIn } = measuredOnHead(context.state.plan);
   const mark = markIn(context);
@@ -25,6 +25,8 @@ export const goodTakeoff: Answers = (context) => {
     'nameplate.serial': 'CH-77310',
     'nameplate.size': head.nominalSize,
     'nameplate.pressure': String(head.ratedPressurePsi),
+    'tape.first': instrumentOf(context, at, (one) => one.kind === 'tape'),
+    'tape.second': instrumentOf(context, at, (one) => one.kind === 'tape'),
     ...twice(base, drawingIn),
     ...string,
     ...twice('mark', mark),

@@ -16,6 +16,12 @@ export const goodSeal: Answers = () => ({
   'seal.state-after': 'sound',
 });
 
+/** The level that stays in calibration longest; nothing to choose where the job lists none. */
+const levelOf = ({ instruments }: JobPlan): string =>
+  instruments
+    .filter((one) => one.kind === 'level')
+    .sort((a, b) => b.calibratedUntil.localeCompare(a.calibratedUntil))[0]?.id ?? '';
+
 /** Two-hole, level and height with as little error as a crew gets on a good day. */
 export const goodOrientation = (plan: JobPlan, prefix: OrientationPrefix): Record<string, string> => ({
   [`${prefix}.holes`]: '4 and 12',
@@ -24,6 +30,7 @@ export const goodOrientation = (plan: JobPlan, prefix: OrientationPrefix): Recor
   [`${prefix}.length`]: '16',
   [`${prefix}.level.x`]: '0.1',
   [`${prefix}.level.y`]: '0.05',
+  [`${prefix}.instrument`]: levelOf(plan),
   [`${prefix}.height`]: plan.terms.targetHeightIn,
 });
 

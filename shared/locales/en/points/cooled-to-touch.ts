@@ -13,6 +13,7 @@ export default {
   },
   fields: {
     cooling: { at: 'Read at', temperature: 'Temperature of the weld' },
+    'cooled-instrument': 'Pyrometer, where one was used',
     ambient: 'Temperature of the air',
     covered: 'Cover',
     'cover-off': 'Cover taken off at',

@@ -6,6 +6,7 @@ export default {
   lead: 'Measure head, string and mark. Two people, two tapes, neither knowing the other’s figure.',
   groups: {
     nameplate: 'The head’s nameplate',
+    tapes: 'The tapes',
     takeoff: 'Face to shoulder by tape',
     socket: 'Base to shoulder by tape',
     string: 'The string',
@@ -14,6 +15,7 @@ export default {
   },
   fields: {
     nameplate: { serial: 'Serial number', size: 'Flange size', pressure: 'Pressure rating' },
+    tape: { first: 'Tape of the first person', second: 'Tape of the second person' },
     takeoff: {
       first: 'Face to shoulder, first person',
       second: `Face to shoulder, ${bySomeoneElse}`,

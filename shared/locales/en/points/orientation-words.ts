@@ -7,6 +7,7 @@ export const orientationFields = {
     x: 'Level along 12 to 6 o’clock, plus when 12 is high',
     y: 'Level along 3 to 9 o’clock, plus when 3 is high',
   },
+  instrument: 'Level that was used',
   height: 'Height of the datum above ground',
 };
 
