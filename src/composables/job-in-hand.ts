@@ -165,8 +165,13 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
     (reached) => reached && look(),
   );
   watch(jobId, (one) => void jobs.open(one), { immediate: true });
-  provide(inHand, hand);
+  provideJobInHand(hand);
   return hand;
+}
+
+/** Hands a job to everything below. */
+export function provideJobInHand(hand: JobInHand): void {
+  provide(inHand, hand);
 }
 
 /** The job that the page above has in hand. */

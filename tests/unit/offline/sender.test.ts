@@ -44,7 +44,9 @@ function aWorld(answers: (id: string, tries: number) => Sent = () => arrived, se
     },
     async replace(at, item) {
       entries = entries.map((one) =>
-        one.place === at ? ({ ...one, ...item, id: itemId(item), state: 'waiting', refused: null } as OutboxEntry) : one,
+        one.place === at
+          ? ({ ...one, ...item, id: itemId(item), state: 'waiting', refused: null } as OutboxEntry)
+          : one,
       );
     },
   };
@@ -66,7 +68,8 @@ function aWorld(answers: (id: string, tries: number) => Sent = () => arrived, se
       return () => undefined;
     },
   };
-  const put = (jobId: string, ...names: string[]) => shelf.put('me', jobId, names.map(file), '2026-09-14T12:00:00.000Z');
+  const put = (jobId: string, ...names: string[]) =>
+    shelf.put('me', jobId, names.map(file), '2026-09-14T12:00:00.000Z');
   return { world, shelf, sent, waits, timers, put, left: () => entries.map((one) => one.id) };
 }
 

@@ -46,6 +46,11 @@ export default {
     calibration: 'calibration of {ref}',
     'instrument-data': 'instrument data {ref}',
   },
+  cautions: {
+    count: { one: '1 applies here.', other: '{count} apply here.' },
+    show: 'Show',
+    read: 'Read, fold them',
+  },
   sentBack: 'Sent back by {name}, {at}',
   reopened: 'Reopened by {name}, {at}',
   presentedBy: 'Presented by {name}, {at}',
