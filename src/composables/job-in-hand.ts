@@ -23,7 +23,7 @@ import { commandGrants } from '../../shared/permissions/commands';
 import { sendCommand } from '../api/job';
 import type { Problem } from '../api/problem';
 import type { SigningSecrets } from '../api/signing';
-import { timesOf } from '../offline/command-times';
+import { timesOf } from '../../shared/job/actor';
 import { expectedState } from '../offline/expected-state';
 import { hashText } from '../offline/hash-text';
 import type { OutboxEntry } from '../offline/outbox-entry';
@@ -89,7 +89,7 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
   const actor = computed(() => (state.value === null ? nobody : actorIn(state.value)));
 
   function judge(command: Command): Refusal | null {
-    const decision = decide(state.value, command, actor.value, timesOf(command.clock), hashText);
+    const decision = decide(state.value, command, actor.value, timesOf(command.clock, null), hashText);
     return decision.ok ? null : decision.refusal;
   }
 
@@ -136,7 +136,8 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
         type,
         basedOn: known.value.events.length || null,
         clock: { ...clock.stamp() },
-        body,
+        // A plain copy: what a form holds is watched, and what is watched cannot be put into the device's store.
+        body: JSON.parse(JSON.stringify(body)),
       }) as unknown as CommandOf<T>,
     judge,
     async record(command, files = []) {
