@@ -1,5 +1,6 @@
 import type { EntityManager } from 'typeorm';
 import type { Planning } from '../../shared/contracts/jobs';
+import { timesOf } from '../../shared/job/actor';
 import { decide } from '../../shared/job/decide';
 import type { Actor } from '../../shared/permissions';
 import { appendEvents } from '../ledger/append-events';
@@ -14,7 +15,6 @@ import { buildPlan } from './build-plan';
 import type { PlanningFault } from './build-plan';
 import { refused, turned } from './command-answer';
 import type { Refused, Turned } from './command-answer';
-import { commandTimes } from './command-times';
 import type { AppDeps } from './deps';
 
 /** A job stands, new or from the receipt of the same request. */
@@ -52,7 +52,7 @@ export async function planJob(
       body: { plan: built.plan },
     };
     const who = { accountId: actor.accountId, name: actor.name, roles: ['coordinator'] as const };
-    const decision = decide(null, command, who, commandTimes(asked.clock, received), sha256);
+    const decision = decide(null, command, who, timesOf(asked.clock, received.toISOString()), sha256);
     if (!decision.ok) {
       const answer = refused(decision.refusal);
       await keepReceipt(manager, sending, { status: answer.status, answer, createdAt: received });

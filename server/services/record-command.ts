@@ -1,6 +1,7 @@
 import type { EntityManager } from 'typeorm';
 import { signedCommands } from '../../shared/contracts/commands';
 import type { Command, CommandType } from '../../shared/contracts/commands';
+import { timesOf } from '../../shared/job/actor';
 import { decide } from '../../shared/job/decide';
 import { foldEvents } from '../../shared/job/evolve';
 import type { Refusal } from '../../shared/job/refusal';
@@ -19,7 +20,6 @@ import { upcast } from '../ledger/upcast';
 import { writeProjections } from '../ledger/write-projections';
 import { refused, toWire, turned, turnedBy } from './command-answer';
 import type { CommandAnswer, Refused } from './command-answer';
-import { commandTimes } from './command-times';
 import { completeCommand } from './complete-command';
 import type { AppDeps } from './deps';
 import { findJobScope } from './find-job-scope';
@@ -85,7 +85,7 @@ export function commitCommand(deps: Pick<AppDeps, 'dataSource' | 'clock'>, given
     if (!complete.ok) return complete;
     const received = deps.clock();
     const who = { accountId: actor.accountId, name: actor.name, roles: rolesOnJob(actor, scope) };
-    const decision = decide(state, complete.command, who, commandTimes(command.clock, received), sha256);
+    const decision = decide(state, complete.command, who, timesOf(command.clock, received.toISOString()), sha256);
     if (!decision.ok) return keepRefusal(manager, given, decision.refusal, received);
     const links = await appendEvents(manager, head, command.id, decision.events);
     await writeProjections(manager, jobRows(head.jobId, [...before, ...decision.events]));

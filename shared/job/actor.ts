@@ -23,6 +23,29 @@ export interface Times {
   doubtMs: number | null;
 }
 
+/** What a device knew of the time when a command was made. */
+interface DeviceClock {
+  deviceAt: string;
+  offsetMs: number | null;
+  doubtMs: number | null;
+}
+
+/**
+ * The three times of a command. A command may have waited for hours, so that its arrival says nothing about the clock
+ * that it was made under, with one exception: nothing arrives before it was made, and by how much it seems to is doubt.
+ */
+export const timesOf = ({ deviceAt, offsetMs, doubtMs }: DeviceClock, received: string | null): Times => {
+  const device = Date.parse(deviceAt);
+  const corrected = device + (offsetMs ?? 0);
+  const early = received === null ? 0 : corrected - Date.parse(received);
+  return {
+    device: new Date(device).toISOString(),
+    corrected: new Date(corrected).toISOString(),
+    received,
+    doubtMs: offsetMs === null || doubtMs === null ? null : Math.max(doubtMs, early),
+  };
+};
+
 /** More doubt than this about the clock is a hold, on gas a stop (architecture, Time). */
 export const clockDoubtLimitMs = 120_000;
 

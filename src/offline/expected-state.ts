@@ -2,7 +2,7 @@ import { decide } from '../../shared/job/decide';
 import type { JobActor } from '../../shared/job/decision';
 import { evolve } from '../../shared/job/evolve';
 import type { JobState } from '../../shared/job/state';
-import { timesOf } from './command-times';
+import { timesOf } from '../../shared/job/actor';
 import { hashText } from './hash-text';
 import type { OutboxEntry } from './outbox-entry';
 
@@ -17,7 +17,7 @@ export const expectedState = (
 ): JobState =>
   entries.reduce((state, entry) => {
     if (entry.kind !== 'command' || entry.state !== 'waiting') return state;
-    const decision = decide(state, entry.body, actorIn(state), timesOf(entry.body.clock), hashText);
+    const decision = decide(state, entry.body, actorIn(state), timesOf(entry.body.clock, null), hashText);
     return decision.ok
       ? decision.events.reduce<JobState>((next, event) => evolve(state.id, next, event), state)
       : state;

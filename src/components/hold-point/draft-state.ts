@@ -5,14 +5,14 @@ import { evolve } from '../../../shared/job/evolve';
 import { changePoint } from '../../../shared/job/points';
 import type { Refusal } from '../../../shared/job/refusal';
 import type { JobState } from '../../../shared/job/state';
-import { timesOf } from '../../offline/command-times';
+import { timesOf } from '../../../shared/job/actor';
 import { hashText } from '../../offline/hash-text';
 
 export type Tried = { ok: true; state: JobState } | { ok: false; refusal: Refusal };
 
 /** The job as it would be with this command carried out: verdicts while typing, by the rules that judge it for good. */
 export const tryOut = (state: JobState, command: Command, actor: JobActor): Tried => {
-  const decision = decide(state, command, actor, timesOf(command.clock), hashText);
+  const decision = decide(state, command, actor, timesOf(command.clock, null), hashText);
   if (!decision.ok) return decision;
   return {
     ok: true,

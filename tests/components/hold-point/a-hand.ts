@@ -6,7 +6,7 @@ import type { JobState } from '../../../shared/job/state';
 import { commandGrants } from '../../../shared/permissions/commands';
 import type { SigningSecrets } from '../../../src/api/signing';
 import { provideJobInHand, type JobInHand, type Outcome } from '../../../src/composables/job-in-hand';
-import { timesOf } from '../../../src/offline/command-times';
+import { timesOf } from '../../../shared/job/actor';
 import { hash, idNumber, shown, type TestJob } from '../../support/a-job';
 import { mountWithWords } from '../mount-with-words';
 
@@ -42,7 +42,7 @@ export function aHand(job: TestJob, actor: JobActor): HandOfTest {
         body,
       }) as unknown as CommandOf<T>,
     judge(command) {
-      const decision = decide(state.value, command, actor, timesOf(command.clock), hash);
+      const decision = decide(state.value, command, actor, timesOf(command.clock, null), hash);
       return decision.ok ? null : decision.refusal;
     },
     async record(command) {

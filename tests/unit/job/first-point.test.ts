@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { timesOf } from '../../../shared/job/actor';
 import { reviewPoint } from '../../../shared/job/review';
 import { aPlan } from '../../support/a-plan';
 import { aJob, TestJob } from '../../support/a-job';
@@ -219,5 +220,23 @@ describe('the plan', () => {
     terms.settings.lelMaxPct = { value: '5', source: 'job' };
     const body = { terms, reason: 'Site rule.', ...job.signingJob() };
     expect(job.refused('change-terms', body, job.person('company_rep'))).toBe('terms-in-use');
+  });
+});
+
+describe('a command’s times', () => {
+  const clock = { deviceAt: '2026-09-14T06:00:00.000Z', offsetMs: 60_000, doubtMs: 300 };
+
+  it('are the device’s own, moved by its offset, and the server’s', () => {
+    expect(timesOf(clock, '2026-09-14T09:00:00.000Z')).toEqual({
+      device: '2026-09-14T06:00:00.000Z',
+      corrected: '2026-09-14T06:01:00.000Z',
+      received: '2026-09-14T09:00:00.000Z',
+      doubtMs: 300,
+    });
+  });
+
+  it('are in doubt by as much as a command seems to arrive before it was made', () => {
+    expect(timesOf(clock, '2026-09-14T05:51:00.000Z').doubtMs).toBe(600_000);
+    expect(timesOf({ ...clock, offsetMs: null }, '2026-09-14T09:00:00.000Z').doubtMs).toBeNull();
   });
 });
