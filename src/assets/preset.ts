@@ -5,6 +5,9 @@ import Aura from '@primeuix/themes/aura';
 const steps = (name: string) =>
   Object.fromEntries([50, 100, 200, 300, 400, 500, 600, 700, 800, 900, 950].map((step) => [step, `var(--${name})`]));
 
+/** What lies over the page for a moment; the night scheme of the library would turn it inside out. */
+const floating = { background: 'var(--sheet)', borderColor: 'var(--ink-soft)', color: 'var(--ink)' };
+
 const scheme = {
   surface: {
     0: 'var(--sheet)',
@@ -56,6 +59,18 @@ const scheme = {
     borderColor: 'var(--hairline)',
     color: 'var(--ink)',
     hoverColor: 'var(--ink)',
+  },
+  overlay: { select: floating, popover: floating, modal: floating },
+  list: {
+    option: {
+      color: 'var(--ink)',
+      focusBackground: 'var(--ground)',
+      focusColor: 'var(--ink)',
+      selectedBackground: 'var(--released-ground)',
+      selectedFocusBackground: 'var(--released-ground)',
+      selectedColor: 'var(--released)',
+      selectedFocusColor: 'var(--released)',
+    },
   },
 };
 
