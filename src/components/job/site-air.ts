@@ -1,4 +1,4 @@
-import { contextOf } from '../../../shared/hold-points/context';
+import { contextOf, readingThatCounts } from '../../../shared/hold-points/context';
 import { gasMinutesLeft, oldestGasReading } from '../../../shared/hold-points/gas';
 import { minutesBetween } from '../../../shared/job/actor';
 import { currentPoint } from '../../../shared/job/points';
@@ -21,6 +21,6 @@ export const airAge = (state: JobState, now: string): AirAge | null => {
     : { ageMin: Math.max(0, Math.floor(minutesBetween(oldest, now))), leftMin: Math.floor(left) };
 };
 
-/** The newest answer to a question of the site. */
+/** The answer that counts to a question of the site. */
 export const siteValue = (state: JobState, field: string): string | undefined =>
-  state.site[field]?.filter((reading) => !reading.late).at(-1)?.value;
+  readingThatCounts(state.site[field])?.value;

@@ -114,7 +114,7 @@ export default {
     noInstrument: 'No instrument of this kind is on the job’s list.',
     before: 'Before: {value}, by {name}, {at}',
     pick: 'Choose one',
-    limit: 'Limit: {limit}, {source}',
+    limit: 'Limit: {limit}',
   },
   photo: {
     take: 'Take a photo',
