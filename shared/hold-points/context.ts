@@ -1,4 +1,4 @@
-import { clockIsDoubtful } from '../job/actor';
+import { clockDoubtLimitMs, clockIsDoubtful } from '../job/actor';
 import type { JobState, PointState, Reading } from '../job/state';
 import type { Instrument, ProcedurePass, SettingName } from '../job/plan';
 import type { PointKind } from './points';
@@ -89,9 +89,6 @@ export const contextOf = (state: JobState, point: PointState): PointContext => {
   };
 };
 
-/** Clocks of two devices may differ by this much and still both be believed, in milliseconds. */
-const slackMs = 2 * 60_000;
-
 const takenBy = (readings: Record<string, Reading[]>, latest: number): Record<string, Reading[]> =>
   Object.fromEntries(
     Object.entries(readings).map(([field, all]) => [
@@ -100,9 +97,12 @@ const takenBy = (readings: Record<string, Reading[]>, latest: number): Record<st
     ]),
   );
 
-/** The view of a point as it was at an instant (ISO): an act is judged by what had been read when it began. */
+/**
+ * The view of a point as it was at an instant (ISO): an act is judged by what had been read when it began, within what
+ * the clocks of two devices may differ and both still be believed.
+ */
 export const contextAsOf = (state: JobState, point: PointState, at: string): PointContext => {
-  const latest = Date.parse(at) + slackMs;
+  const latest = Date.parse(at) + clockDoubtLimitMs;
   const then = { ...point, readings: takenBy(point.readings, latest) };
   const points = state.points.map((one) => (one.place.id === point.place.id ? then : one));
   return contextOf({ ...state, points, site: takenBy(state.site, latest) }, then);

@@ -5,7 +5,7 @@ import { settingNames } from './plan';
 import { planRefused } from './plan-refused';
 import { withTrueSources } from './settings';
 import type { JobState } from './state';
-import { settingUsedBy, termUsedBy } from './terms-in-use';
+import { onlyStricter, settingUsedBy, termUsedBy } from './terms-in-use';
 
 /** Any time before the head is lifted; after that turning it rolls the seal. */
 export const decideNameDirection: Decider<'name-direction'> = (input) => {
@@ -36,7 +36,9 @@ const inUse = (state: JobState, terms: Terms): string[] => {
   ];
   return [
     ...moved.filter((name) => termUsedBy[name].some((kind) => released.includes(kind))),
-    ...changedSettings(old, terms).filter((name) => settingUsedBy[name].some((kind) => released.includes(kind))),
+    ...changedSettings(old, terms)
+      .filter((name) => !onlyStricter(name, old, terms))
+      .filter((name) => settingUsedBy[name].some((kind) => released.includes(kind))),
   ];
 };
 

@@ -4,10 +4,9 @@ import type { SettingName, Terms } from './plan';
 
 /**
  * Which points are judged by which term. A term that a released point used is changed only after that point is reopened.
- * Gas freshness is looked at before every flame, so it may move at any time and holds from then on.
  */
 export const settingUsedBy: Record<SettingName, readonly PointKind[]> = {
-  gasFreshMin: [],
+  gasFreshMin: ['height-takeoff', 'final-cut', 'bevel-prep', 'preheat-reached', 'pass-inspected'],
   lelMaxPct: ['hot-work-clearance'],
   tapesAgreeIn: ['height-takeoff'],
   markAgreesIn: ['height-takeoff'],
@@ -35,3 +34,10 @@ export const termUsedBy: Record<Exclude<keyof Terms, 'settings'>, readonly Point
   standOffIn: fromTakeoff,
   test: ['pressure-test-held'],
 };
+
+/** Limits of the air. They are looked at before every flame, so a stricter one is never refused: it holds from then on. */
+const ofTheAir: readonly SettingName[] = ['gasFreshMin', 'lelMaxPct'];
+
+/** Whether a setting moves to the safe side in a way that no release has to be taken back for. */
+export const onlyStricter = (name: SettingName, from: Terms, to: Terms): boolean =>
+  ofTheAir.includes(name) && Number(to.settings[name].value) < Number(from.settings[name].value);

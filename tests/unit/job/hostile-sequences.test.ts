@@ -248,6 +248,18 @@ describe('terms', () => {
     expect(job.refused('change-terms', changed(job, { settings }), rep(job))).toBe('plan-not-workable');
   });
 
+  it('of the air become stricter at any time and laxer only where no flame has used them', () => {
+    const job = at('bevel-prep');
+    const fresh = (value: string) => {
+      const settings = { ...job.job.plan.terms.settings, gasFreshMin: { value, source: 'job' as const } };
+      return changed(job, { settings });
+    };
+    expect(job.refused('change-terms', fresh('90'), rep(job))).toBe('terms-in-use');
+    job.do('change-terms', fresh('30'), rep(job));
+    freshAir(job).minutes(31);
+    expect(blockers(job.try('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job)))).toEqual(['gas-fresh']);
+  });
+
   it('do not pass for common practice with another value', () => {
     const job = aJob();
     const settings = {
