@@ -4,7 +4,7 @@ import { evolve } from '../../shared/job/evolve';
 import type { JobState } from '../../shared/job/state';
 import { asEvent, readEvents, type WireEvent } from '../api/job';
 import type { Problem } from '../api/problem';
-import { cachedEvents, cacheEvents, forgetJobs } from '../offline/job-cache';
+import { cachedEvents, cacheEvents } from '../offline/job-cache';
 import { listenToTabs } from '../offline/tabs';
 import { useOutboxStore } from './outbox';
 import { useSessionStore } from './session';
@@ -76,15 +76,10 @@ export const useJobsStore = defineStore('jobs', () => {
     if (!merge(jobId, events)) void refresh(jobId);
   }
 
-  function forget(): void {
-    known.clear();
-    if (session.me !== undefined) void forgetJobs(session.me.id);
-  }
-
   outbox.onArrival((jobId, answer) => take(jobId, answer.events));
   listenToTabs((jobId) => {
     if (known.has(jobId)) void refresh(jobId);
   });
 
-  return { of, open, refresh, take, forget };
+  return { of, open, refresh, take };
 });

@@ -3,6 +3,7 @@ import { computed, shallowRef, watch } from 'vue';
 import type { Command } from '../../shared/contracts/commands';
 import { askSession } from '../api/account';
 import type { CommandAnswer } from '../api/job';
+import { forgetJobs } from '../offline/job-cache';
 import { outboxShelf } from '../offline/outbox';
 import type { OutboxEntry, OutboxItem } from '../offline/outbox-entry';
 import { makeSender } from '../offline/sender';
@@ -99,7 +100,9 @@ export const useOutboxStore = defineStore('outbox', () => {
   watch(unsent, (count) => connection.setUnsent(count), { immediate: true });
   watch(
     () => session.me?.id,
-    async () => {
+    async (id, before) => {
+      // Whoever signs out takes what was read along; what is unsent waits for its owner. A session that ran out keeps both.
+      if (id === undefined && before !== undefined && !session.ended) await forgetJobs(before);
       await read();
       void sender.kick();
     },
