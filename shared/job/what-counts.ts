@@ -2,6 +2,7 @@ import type { PointContext } from '../hold-points/context';
 import { namedDirection } from '../hold-points/named-direction';
 import type { PointKind } from '../hold-points/points';
 import { text, type Text, type TextParam } from '../locales/text';
+import { toDecimal } from '../units/decimal';
 import type { Chapter } from './story';
 
 /** Looks a number up in a chapter for a sentence; undefined when it was never read or worked out. */
@@ -72,6 +73,14 @@ const lines: Record<PointKind, Line> = {
 /** Signs stand for a direction that the sentence does not tell: `0.15°` is the size of the error. */
 const size = (value: string): string => value.replace(/^-/, '');
 
+/** Decimals that a line in a table of contents needs; inches keep their sixty-fourths. */
+const places: Partial<Record<string, number>> = { deg: 2, kJPerIn: 1, psi: 0, degF: 0 };
+
+const rounded = (value: string, unit: string): string => {
+  const decimals = places[unit];
+  return decimals === undefined ? value : toDecimal(Number(value), decimals);
+};
+
 /** The one line that tells a hold point in the table of contents; null when its numbers are not there. */
 export const whatCounts = ({ review, point }: Chapter): Text | null => {
   const { context } = review;
@@ -80,7 +89,7 @@ export const whatCounts = ({ review, point }: Chapter): Text | null => {
     computed: (key, difference) => {
       const found = review.computed.find((one) => one.key === key);
       if (!found) return undefined;
-      const quantity = key.endsWith('rotation') ? size(found.value) : found.value;
+      const quantity = rounded(key.endsWith('rotation') ? size(found.value) : found.value, found.unit);
       return difference ? { quantity, unit: found.unit, difference } : { quantity, unit: found.unit };
     },
     read: (field, unit) => {

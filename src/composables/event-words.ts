@@ -37,7 +37,10 @@ export function useEventWords(): (event: JobEvent) => string {
       }
       case 'act-begun':
       case 'act-ended':
-        return { key, params: { title: title(event.body.point), act: pointWords(event.body.point, 'acts', event.body.act) } };
+        return {
+          key,
+          params: { title: title(event.body.point), act: pointWords(event.body.point, 'acts', event.body.act) },
+        };
       case 'presentation-withdrawn': {
         const late = event.body.cause === 'late-evidence';
         return { key: late ? `${key}-late` : key, params: { title: title(event.body.point) } };

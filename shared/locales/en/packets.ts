@@ -38,7 +38,8 @@ export default {
     recomputed: '{events} recomputed in this page in {seconds} s, from the first to the last.',
     bound: '{signatures} worked out anew: each is bound to what it was given for.',
     unbound: '{signatures} given for something other than what stands here. First: event {seq}, {name}.',
-    notHere: 'The job was run by another version of the hold points, so its signed contents cannot be made again here; the chain speaks for them.',
+    notHere:
+      'The job was run by another version of the hold points, so its signed contents cannot be made again here; the chain speaks for them.',
     at: 'First at event {seq} of {total}, {type}. What stands before it holds; nothing after it can be believed.',
     why: {
       gap: 'A number is missing in the row.',
@@ -48,9 +49,11 @@ export default {
       'cut-short': 'The end is missing: the server names a later last event.',
     },
     server: 'The server’s own check agrees.',
+    serverHolds: 'The server’s own check says that all holds.',
     serverNot: 'The server’s own check says otherwise: event {seq}. {why}',
     head: 'Last hash',
-    headWhy: 'Compare it with a copy that left the house when the job was sealed: only that shows that nobody wrote the whole record anew.',
+    headWhy:
+      'Compare it with a copy that left the house when the job was sealed: only that shows that nobody wrote the whole record anew.',
     photosDo: 'Recompute the photos too',
     photosRunning: '{done} of {total} files recomputed',
     photosHold: '{files} recomputed: each is what was hashed.',

@@ -19,5 +19,5 @@ export function useReadingWords(words: PointWords, state: () => JobState): Print
   };
 }
 
-/** A few figures are set large, words are not. */
-export const isFigure = ({ value }: PrintedQuantity): boolean => value.length <= 12;
+/** Figures are set large, words are not. */
+export const isFigure = ({ of }: Pick<FieldDefinition, 'of'>): boolean => of.type === 'quantity' || of.type === 'count';

@@ -2,7 +2,10 @@
 export default {
   'job-planned': 'Job planned',
   'readings-recorded': { one: '{title}: 1 reading recorded', other: '{title}: {count} readings recorded' },
-  'readings-late': { one: '{title}: 1 reading arrived after the release', other: '{title}: {count} readings arrived after the release' },
+  'readings-late': {
+    one: '{title}: 1 reading arrived after the release',
+    other: '{title}: {count} readings arrived after the release',
+  },
   'photo-added': '{title}: photo, {shot}',
   'photo-late': '{title}: photo arrived after the release, {shot}',
   'photo-set-aside': '{title}: photo set aside. {reason}',

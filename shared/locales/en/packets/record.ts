@@ -82,7 +82,7 @@ export default {
     value: 'Value',
     limit: 'Limit and source',
     verdict: 'Verdict',
-    by: 'Measured by',
+    by: 'By',
     typedBy: 'typed by {name}',
     typed: 'typed as {typed}',
     at: 'At',
