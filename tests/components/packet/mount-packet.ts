@@ -3,7 +3,6 @@ import { createPinia } from 'pinia';
 import { vi } from 'vitest';
 import type { Component } from 'vue';
 import { createMemoryHistory, createRouter, type Router } from 'vue-router';
-import { routes } from '../../../src/router/routes';
 
 /** Mounts a page at its address, over a server that answers in memory. Says which addresses it asked for. */
 export async function mountAt(view: Component, address: string, serve: (address: string) => Response) {
@@ -12,9 +11,14 @@ export async function mountAt(view: Component, address: string, serve: (address:
     asked.push(path);
     return serve(path);
   });
+  const nothing = { render: () => null };
   const router: Router = createRouter({
     history: createMemoryHistory(),
-    routes: routes.map((route) => ('component' in route ? { ...route, component: { render: () => null } } : route)),
+    routes: [
+      { path: '/packets', name: 'packets', component: nothing },
+      { path: '/packets/:id', name: 'packet', component: nothing },
+      { path: '/:rest(.*)*', name: 'elsewhere', component: nothing },
+    ],
   });
   await router.push(address);
   const page = mount(view, {
