@@ -108,7 +108,9 @@ export class DemoJob {
   private async take(point: string, step: Step): Promise<void> {
     if (step.do === 'record') await this.give('welder', 'record', { point: step.point, entries: step.entries });
     else if (step.do === 'add-photo') {
-      const file = { sha256: await this.photograph(step.shot), previewSha256: null, width: 1, height: 1 };
+      // these pictures are small: each is its own preview
+      const sha256 = await this.photograph(step.shot);
+      const file = { sha256, previewSha256: sha256, width: 1, height: 1 };
       await this.give('welder', 'add-photo', { point, shot: step.shot, ...file, takenAt: this.at });
     } else await this.give('welder', step.do, { point, act: step.act });
     this.wait(step.minutes);

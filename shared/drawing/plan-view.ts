@@ -21,9 +21,9 @@ export interface PlanViewInput {
 
 const width = 360;
 const height = 320;
-const centre: Point = { x: 180, y: 170 };
-const flange = 106;
-const boltCircle = 86;
+const centre: Point = { x: 166, y: 170 };
+const flange = 104;
+const boltCircle = 85;
 const bore = 50;
 /** a real error of half a degree cannot be seen; the drawing leans ten times as far and says so */
 const exaggeration = 10;
@@ -84,14 +84,15 @@ const valve = (input: PlanViewInput, lean: number): Primitive[] => {
   if (input.bearingDeg === null && input.direction === null) return [];
   const degrees = (input.bearingDeg ?? 90) + lean;
   const at = onCircle(centre, flange + 46, degrees);
-  const below = at.y > centre.y + 60;
+  // at the side the words stand above the arrow's shaft, clear of the flange's edge
+  const besides = (tip: Point): number => (tip.y > centre.y + 60 ? height - 24 : Math.abs(tip.x - centre.x) > 60 ? Math.min(tip.y + flange * 0.62, height - 26) : tip.y + 26);
   return [
     { kind: 'arrow', from: onCircle(centre, flange, degrees), to: onCircle(centre, flange + 40, degrees), tone: 'ink', heavy: true },
     ...(input.direction
       ? [
           {
             kind: 'label' as const,
-            at: { x: Math.min(Math.max(at.x, 50), width - 6), y: below ? height - 8 : Math.min(at.y + 26, height - 8) },
+            at: { x: at.x > centre.x + 60 ? width - 8 : Math.min(Math.max(at.x, 8), width - 8), y: besides(at) },
             text: input.direction,
             anchor: at.x > centre.x + 60 ? ('end' as const) : at.x < centre.x - 60 ? ('start' as const) : ('middle' as const),
             size: 'normal' as const,

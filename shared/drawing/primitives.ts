@@ -6,7 +6,7 @@ export type LineKind = 'thick' | 'thin' | 'dashed' | 'centre' | 'dotted';
 export type Tone = 'ink' | 'soft' | 'hairline' | 'straw' | 'purple' | 'blue' | 'oxide' | 'within';
 
 /** A number to be printed in the reader's own units, or a sentence, or words that are the same in every language. */
-export type Label = { amount: string; unit: string } | Text | string;
+export type Label = { amount: string; unit: string; /** without the unit: it stands beside the drawing */ bare?: true } | Text | string;
 
 export interface Point {
   x: number;

@@ -33,10 +33,10 @@ const quarters: readonly Quarter[] = ['12', '3', '6', '9'];
 
 const lowSide = (degrees: number): Primitive[] => {
   const tip = onCircle(centre, radius - 6, degrees);
-  const words = onCircle(centre, radius + 16, degrees);
-  const anchor = words.x > centre.x + 20 ? 'start' : words.x < centre.x - 20 ? 'end' : 'middle';
-  // beside the circle, between two numbers, at half the way towards the nearest free corner
-  const free = { x: words.x, y: Math.min(Math.max(words.y, 50), 168) };
+  // in the nearest corner between two numbers, so that words never cover a reading
+  const corner = (Math.floor((((degrees % 360) + 360) % 360) / 90) + 0.5) * 90;
+  const free = onCircle(centre, radius + 14, corner);
+  const anchor = free.x > centre.x ? 'start' : 'end';
   return [
     { kind: 'arrow', from: centre, to: tip, tone: 'oxide', heavy: false },
     { kind: 'label', at: free, text: { key: 'drawing.clock.low-side' }, anchor, size: 'small', tone: 'oxide' },
@@ -57,7 +57,7 @@ export const quadrantClock = ({ values, unit, lowSideDegrees, outside = [] }: Qu
       {
         kind: 'label',
         at: value,
-        text: reading === undefined ? '–' : { amount: toDecimal(reading), unit },
+        text: reading === undefined ? '–' : { amount: toDecimal(reading), unit, bare: true },
         anchor,
         size: 'large',
         tone: reading === undefined ? 'soft' : tone,
