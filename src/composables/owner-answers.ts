@@ -19,8 +19,8 @@ export interface PointToAnswer {
 /** What an owner may answer to a presented point, whether Release stands ready, and if not, why. */
 export interface OwnerAnswers {
   readonly owns: ComputedRef<boolean>;
-  readonly concedes: ComputedRef<boolean>;
-  readonly ownHand: ComputedRef<boolean>;
+  /** something outside waits for this person's concession */
+  readonly mustConcede: ComputedRef<boolean>;
   readonly ready: ComputedRef<boolean>;
   readonly why: ComputedRef<string | undefined>;
   readonly direction: ComputedRef<TextParam>;
@@ -66,8 +66,7 @@ export function useOwnerAnswers(shown: MaybeRefOrGetter<PointToAnswer>, said: Re
 
   return {
     owns,
-    concedes,
-    ownHand,
+    mustConcede: computed(() => waits.value && concedes.value && review.value.unconceded.length > 0 && !ownHand.value),
     ready,
     why,
     direction,
