@@ -47,7 +47,10 @@ export async function takeAttempt(db: DataSource, kind: AttemptKind, whom: strin
 
 /** The secret was right: what was counted against this account is forgotten. */
 export async function forgetAttempts(db: DataSource, kind: AttemptKind, whom: string): Promise<void> {
-  await db.query('DELETE FROM attempt_throttles WHERE bucket = ?', [bucketOf(kind, whom)]);
+  // the row stays: another try at this very moment counts on it
+  await db.query('UPDATE attempt_throttles SET failures = 0, locked_until = NULL WHERE bucket = ?', [
+    bucketOf(kind, whom),
+  ]);
 }
 
 /** The secret was right: only this one try is given back, for a counter that many people share. */
