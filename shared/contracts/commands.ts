@@ -167,7 +167,7 @@ const bodies = {
       .max(40),
   }),
   reopen: z.strictObject({ point: pointId, reason, ...signedContent }),
-  'open-repair-round': z.strictObject({ reason, passes: z.int().min(1).max(12) }),
+  'open-repair-round': z.strictObject({ reason, passes: z.int().min(1).max(12), ...signedContent }),
   'set-again': z.strictObject({ reason, head, targetHeightIn: decimal, ...signedContent }),
   'name-direction': z.strictObject({
     direction: z.enum(['v-door', 'mud-tanks', 'pipe-racks', 'doghouse', 'choke-manifold', 'other']),

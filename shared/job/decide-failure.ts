@@ -14,9 +14,17 @@ export const decideOpenRepairRound: Decider<'open-repair-round'> = (input) => {
   if (!current || (kind !== 'cooled-to-touch' && kind !== 'pressure-test-held')) return refuse('no-round-here');
   const running = runningAct(state);
   if (running) return refuse('act-running', { since: running.begun });
+  const moved = jobContentMoved(input, command.body);
+  if (moved) return moved;
   const { reason, passes } = command.body;
   return accept(
-    event(input, 'repair-round-opened', { round: state.rounds.length + 1, passes, from: current.place.id, reason }),
+    event(input, 'repair-round-opened', {
+      round: state.rounds.length + 1,
+      passes,
+      from: current.place.id,
+      reason,
+      signature: signature(input, 'open-repair-round', command.body),
+    }),
   );
 };
 

@@ -69,7 +69,7 @@ interface EventBodies {
     signature: Signature;
   };
   'point-reopened': { point: PointId; reason: string; signature: Signature };
-  'repair-round-opened': { round: number; passes: number; from: PointId; reason: string };
+  'repair-round-opened': { round: number; passes: number; from: PointId; reason: string; signature: Signature };
   'setting-begun': { setting: number; head: Head; targetHeightIn: string; reason: string; signature: Signature };
   'direction-named': { direction: string; words: string | null };
   'direction-proposed': { direction: string };

@@ -107,7 +107,8 @@ describe('every command', () => {
     const head = demoHeads[0] as Head;
     await job.do('companyRep', 'set-again', { reason, head, targetHeightIn: '5', ...job.signingJob() });
     await job.walkTo('cooled-to-touch');
-    await job.do('companyRep', 'open-repair-round', { reason: "Porosity at 4 o'clock", passes: 1 });
+    const round = { reason: "Porosity at 4 o'clock", passes: 1, ...job.signingJob() };
+    await job.do('companyRep', 'open-repair-round', round);
     await (await job.walkTo(null)).seal();
     expect(job.state).toMatchObject({ status: 'sealed', setting: 2, rounds: [{ round: 1, passes: 1 }] });
 

@@ -93,7 +93,7 @@ const termsChanged = (job: TestJob): void => {
 const failedTest = (job: TestJob): void => {
   recordPoint(job, test, { 'hold-readings.3.pressure': '1390' });
   const reason = 'Lost 110 psi in ten minutes; the weld weeps at 4 o’clock.';
-  job.do('open-repair-round', { reason, passes: 1 }, job.person('company_rep'));
+  job.do('open-repair-round', { reason, passes: 1, ...job.signingJob() }, job.person('company_rep'));
 };
 
 /**

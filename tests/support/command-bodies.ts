@@ -32,7 +32,7 @@ export const commandBodies: { [T in CommandType]: CommandOf<T>['body'] } = {
   'send-back': { point: first, reason, contentHash: signed.contentHash },
   concede: { point: first, items: [{ limit: 'none', basis: [], reason }], ...signed },
   reopen: { point: first, reason, ...signed },
-  'open-repair-round': { reason, passes: 1 },
+  'open-repair-round': { reason, passes: 1, ...signed },
   'set-again': { reason, head: demoHeads[0] as Head, targetHeightIn: '5', ...signed },
   'name-direction': { direction: 'v-door', words: null },
   'propose-direction': { direction: 'v-door' },

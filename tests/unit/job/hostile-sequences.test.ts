@@ -318,7 +318,7 @@ describe('a head that is set again', () => {
 describe('a repair round', () => {
   it('is gone when a point before it is reopened, and the next one has a new name', () => {
     const job = at('pressure-test-held');
-    job.do('open-repair-round', { reason, passes: 1 }, rep(job));
+    job.do('open-repair-round', { reason, passes: 1, ...job.signingJob() }, rep(job));
     walkPoint(job, 'test-plug-removed-r1');
     expect(job.refused('record', { point: 'pressure-test-held', entries: [entry('leak', 'none')] }, hand(job))).toBe(
       'point-shut',
@@ -329,7 +329,7 @@ describe('a repair round', () => {
       job.refused('record', { point: 'preheat-reached-r1', entries: [entry('joint-dry', 'yes')] }, hand(job)),
     ).toBe('point-shut');
     walkTo(job, 'pressure-test-held');
-    job.do('open-repair-round', { reason, passes: 1 }, rep(job));
+    job.do('open-repair-round', { reason, passes: 1, ...job.signingJob() }, rep(job));
     expect(job.job.points.find((point) => point.status === 'open')?.place.id).toBe('test-plug-removed-r2');
     walkTo(job, null);
     job.do('seal', { concessions: concessionTotal(job.job), ...job.signingJob() }, rep(job));

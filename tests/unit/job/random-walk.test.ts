@@ -97,7 +97,7 @@ const take = async (job: TestJob, { what, who, where, minutes }: Step): Promise<
       job.try('reopen', { point, reason, ...job.signing(point) }, actor);
       return;
     case 'repair':
-      job.try('open-repair-round', { reason, passes: 1 }, actor);
+      job.try('open-repair-round', { reason, passes: 1, ...job.signingJob() }, actor);
       return;
     case 'stop':
       job.try('stop-work', { reason }, actor);

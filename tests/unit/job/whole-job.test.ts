@@ -3,7 +3,8 @@ import { presentPoint, recordPoint, releasePoint, walkPoint, walkTo } from '../.
 import { foldEvents } from '../../../shared/job/evolve';
 import { concessionTotal } from '../../../shared/job/decide-failure';
 import { aPlan, type PlanOverrides } from '../../support/a-plan';
-import { aJob } from '../../support/a-job';
+import { checkSignatures } from '../../../shared/job/check-signatures';
+import { aJob, hash } from '../../support/a-job';
 
 const statuses = (job: ReturnType<typeof aJob>) => job.job.points.map((point) => `${point.place.id} ${point.status}`);
 
@@ -79,8 +80,8 @@ describe('a failed test', () => {
     const job = aJob();
     walkTo(job, 'pressure-test-held');
     recordPoint(job, 'pressure-test-held', failed);
-    expect(job.refused('open-repair-round', { reason: 'Lost 100 psi.', passes: 2 }, job.person('welder'))).toBe('not-yours-to-do');
-    job.do('open-repair-round', { reason: 'Lost 100 psi at the weld.', passes: 2 }, job.person('company_rep'));
+    expect(job.refused('open-repair-round', { reason: 'Lost 100 psi.', passes: 2, ...job.signingJob() }, job.person('welder'))).toBe('not-yours-to-do');
+    job.do('open-repair-round', { reason: 'Lost 100 psi at the weld.', passes: 2, ...job.signingJob() }, job.person('company_rep'));
     expect(statuses(job).slice(-6)).toEqual([
       'pressure-test-held shut',
       'test-plug-removed-r1 open',
@@ -97,10 +98,26 @@ describe('a failed test', () => {
     expect(Object.keys(job.point('pressure-test-held').readings).length).toBeGreaterThan(5);
   });
 
+  it('opens its round under a signature on the job as it was shown', () => {
+    const job = aJob();
+    walkTo(job, 'pressure-test-held');
+    const shownBefore = job.signingJob();
+    recordPoint(job, 'pressure-test-held', failed);
+    const round = { reason: 'Lost 100 psi at the weld.', passes: 2 };
+    expect(job.refused('open-repair-round', { ...round, ...shownBefore }, job.person('company_rep'))).toBe('content-changed');
+    const signed = job.signingJob();
+    job.do('open-repair-round', { ...round, ...signed }, job.person('company_rep'));
+    expect(job.events.at(-1)).toMatchObject({
+      type: 'repair-round-opened',
+      body: { signature: { meaning: 'signature.open-repair-round', role: 'company_rep', contentHash: signed.contentHash } },
+    });
+    expect(checkSignatures(job.id, job.events, hash)?.every((one) => one.bound)).toBe(true);
+  });
+
   it('is not opened before point 10', async () => {
     const job = aJob();
     walkTo(job, 'bevel-prep');
-    expect(job.refused('open-repair-round', { reason: 'too early', passes: 1 }, job.person('company_rep'))).toBe('no-round-here');
+    expect(job.refused('open-repair-round', { reason: 'too early', passes: 1, ...job.signingJob() }, job.person('company_rep'))).toBe('no-round-here');
   });
 });
 
