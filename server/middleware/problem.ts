@@ -34,6 +34,7 @@ const titles: Record<number, string> = {
 const plain: Formatters = {
   quantity: (quantity, unit) => `${quantity} ${unit}`,
   instant: (iso) => iso,
+  day: (date) => date,
   number: (value) => String(value),
 };
 

@@ -33,7 +33,7 @@ const judgeCalibration = (context: PointContext, field: FieldDefinition): Verdic
     about: [field.key],
     source: { kind: 'calibration', ref: used.serial },
     says: gas ? 'calibration-gas-meter' : 'calibration',
-    params: { name: used.name, until: { instant: `${used.calibratedUntil}T00:00:00.000Z` } },
+    params: { name: used.name, until: { day: used.calibratedUntil } },
     holds: siteDay(context.state.plan.zone, reading.at.corrected) <= used.calibratedUntil,
   });
 };

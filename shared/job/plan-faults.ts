@@ -122,7 +122,7 @@ const instrumentFaults = ({ instruments }: JobPlan, day: string): Verdict[] => [
   ...instruments
     .filter((instrument) => instrument.calibratedUntil < day)
     .map((instrument) =>
-      fault({ limit: 'instrument-out-of-date', kind: 'hold', about: ['instrumentIds'], source: { kind: 'calibration', ref: instrument.serial }, params: { name: instrument.name, until: { instant: `${instrument.calibratedUntil}T00:00:00.000Z` } } }),
+      fault({ limit: 'instrument-out-of-date', kind: 'hold', about: ['instrumentIds'], source: { kind: 'calibration', ref: instrument.serial }, params: { name: instrument.name, until: { day: instrument.calibratedUntil } } }),
     ),
   ...(['gas-meter', 'gauge'] as const)
     .filter((kind) => !instruments.some((instrument) => instrument.kind === kind || (kind === 'gauge' && instrument.kind === 'recorder')))

@@ -21,6 +21,10 @@ export function printInstant(iso: string, zone: string, language: Language): str
   return format === undefined ? `${printed} UTC` : printed;
 }
 
+/** A day of the calendar: `31 Aug 2026`. */
+export const printDay = (day: string, language: Language): string =>
+  printInstant(`${day}T00:00:00Z`, 'UTC', language).replace(/ \d\d:\d\d$/, '');
+
 function formatFor(zone: string, language: Language): Intl.DateTimeFormat | undefined {
   const key = `${language} ${zone}`;
   const found = made.get(key);

@@ -9,6 +9,7 @@ export interface Messages {
 export interface Formatters {
   quantity(quantity: string, unit: string, difference?: true): string;
   instant(iso: string): string;
+  day(date: string): string;
   number(value: number): string;
 }
 
@@ -52,5 +53,6 @@ function inWords(messages: Messages, param: TextParam, formatters: Formatters): 
   if (typeof param === 'number') return formatters.number(param);
   if ('quantity' in param) return formatters.quantity(param.quantity, param.unit, param.difference);
   if ('instant' in param) return formatters.instant(param.instant);
+  if ('day' in param) return formatters.day(param.day);
   return say(messages, param, formatters);
 }

@@ -1,5 +1,5 @@
 /** What may stand in a message: plain words and numbers, or a value that is printed the reader's way. */
-export type TextParam = string | number | QuantityParam | InstantParam | Text;
+export type TextParam = string | number | QuantityParam | InstantParam | DayParam | Text;
 
 /** A measured value as the record keeps it: a decimal string and the code of its unit. */
 export interface QuantityParam {
@@ -12,6 +12,11 @@ export interface QuantityParam {
 /** A moment, ISO 8601. */
 export interface InstantParam {
   readonly instant: string;
+}
+
+/** A day of the site's calendar, `2026-08-31`: it has no hour and no zone. */
+export interface DayParam {
+  readonly day: string;
 }
 
 /**

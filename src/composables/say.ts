@@ -1,5 +1,5 @@
 import { getCurrentInstance } from 'vue';
-import { printInstant } from '../../shared/locales/print-instant';
+import { printDay, printInstant } from '../../shared/locales/print-instant';
 import { hasWords, say as sayIn, type Formatters } from '../../shared/locales/say';
 import type { Text, TextParam } from '../../shared/locales/text';
 import { printQuantity, quantityParts, type PrintedQuantity } from '../../shared/units/format';
@@ -30,6 +30,7 @@ export function useSay(): Sayer {
   const formatters: Formatters = {
     quantity: (value, unit, difference) => printQuantity(value, unit, preferences.units, difference),
     instant,
+    day: (date) => printDay(date, preferences.language),
     number: String,
   };
 

@@ -13,6 +13,7 @@ const messages = { limits, points };
 const plainly: Formatters = {
   quantity: (value, unit) => `${value} ${unit}`,
   instant: (iso) => iso,
+  day: (date) => date,
   number: (value) => String(value),
 };
 

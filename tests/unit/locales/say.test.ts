@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { printInstant } from '../../../shared/locales/print-instant';
+import { printDay, printInstant } from '../../../shared/locales/print-instant';
 import { say, type Formatters } from '../../../shared/locales/say';
 import { printQuantity } from '../../../shared/units/format';
 
@@ -12,6 +12,7 @@ const messages = {
 const formatters: Formatters = {
   quantity: (value, unit, difference) => printQuantity(value, unit, 'imperial', difference),
   instant: (iso) => printInstant(iso, 'America/Chicago', 'en'),
+  day: (date) => printDay(date, 'en'),
   number: String,
 };
 const said = (key: string, params = {}) => say(messages, { key, params }, formatters);
@@ -25,6 +26,8 @@ describe('saying a text', () => {
     };
     expect(said('cut.low', params)).toBe("Low by 7/64\u00a0in. Limit 1/16\u00a0in, this job's setting.");
     expect(said('at', { at: { instant: '2026-03-02T09:10:00Z' } })).toBe('Presented 02 Mar 2026 03:10');
+    // a day has no zone: west of Greenwich it is still the same day
+    expect(said('at', { at: { day: '2026-03-02' } })).toBe('Presented 02 Mar 2026');
   });
 
   it('chooses one or many by the count', () => {
