@@ -1,5 +1,6 @@
 import type { PlacedField, PointReview } from '../../../shared/job/review';
 import type { Verdict } from '../../../shared/hold-points/verdict';
+import { verdictsAt, verdictsUnder } from '../hold-point/placed-verdicts';
 
 /** A field in the desk's table with the limits that it was held against, the ones outside first. */
 export interface DeskReading {
@@ -10,14 +11,12 @@ export interface DeskReading {
 export interface DeskGroup {
   readonly key: string;
   readonly readings: readonly DeskReading[];
+  /** what rests on several readings together: said once below them */
+  readonly together: readonly Verdict[];
 }
 
 const outsideFirst = (one: Verdict, other: Verdict): number =>
   Number(other.outcome === 'outside') - Number(one.outcome === 'outside');
-
-/** A limit stands once, at the first of its fields; one that is outside at every field that it is about. */
-const isShownAt = (verdict: Verdict, key: string): boolean =>
-  verdict.about[0] === key || (verdict.outcome === 'outside' && verdict.about.includes(key));
 
 /** The other end of the same range: both within, one from below and one from above, by the same source. */
 const isOtherEnd = (one: Verdict, other: Verdict): boolean =>
@@ -50,17 +49,20 @@ export const inRanges = (verdicts: readonly Verdict[]): Verdict[] =>
 
 /** What was read at a point, group by group, each reading with its verdicts; groups with something outside come first. */
 export function deskGroups(review: PointReview): DeskGroup[] {
-  const groups = review.groups.map((group) => ({
-    key: group.key,
-    readings: review.fields
-      .filter((field) => field.group === group.key && review.context.read(field.key) !== undefined)
-      .map((field) => ({
-        field,
-        verdicts: inRanges(review.verdicts.filter((verdict) => isShownAt(verdict, field.key))).sort(outsideFirst),
-      })),
-  }));
-  const isOut = ({ readings }: DeskGroup) =>
-    readings.some(({ verdicts }) => verdicts.some(({ outcome }) => outcome === 'outside'));
+  const lines = (verdicts: readonly Verdict[]) => inRanges(verdicts).sort(outsideFirst);
+  const groups = review.groups.map(({ key }): DeskGroup => {
+    const placed = review.fields.filter((field) => field.group === key && review.context.read(field.key) !== undefined);
+    return {
+      key,
+      readings: placed.map((field) => ({ field, verdicts: lines(verdictsAt(review.verdicts, field.key)) })),
+      together: verdictsUnder(
+        review.verdicts,
+        placed.map((field) => field.key),
+      ).sort(outsideFirst),
+    };
+  });
+  const isOut = ({ readings, together }: DeskGroup) =>
+    [...together, ...readings.flatMap(({ verdicts }) => verdicts)].some(({ outcome }) => outcome === 'outside');
   return groups
     .filter(({ readings }) => readings.length > 0)
     .sort((one, other) => Number(isOut(other)) - Number(isOut(one)));
