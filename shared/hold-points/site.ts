@@ -39,6 +39,33 @@ const since = (context: PointContext, field: string, stoppedAt: string): boolean
   return reading !== undefined && !clockIsDoubtful(reading.at) && minutesBetween(stoppedAt, reading.at.corrected) >= 0;
 };
 
+/** Heat that was read before the stop says nothing of the joint now. */
+const judgeHeat = (context: PointContext, stoppedAt: string): Verdict[] => {
+  const frame = {
+    limit: 'resume-preheat',
+    kind: 'stop' as const,
+    about: ['resume.temperature'],
+    source: byProcedure(context),
+  };
+  if (!since(context, 'resume.temperature', stoppedAt))
+    return judgeFact(context, { ...frame, says: 'resume-preheat-unread', holds: false });
+  const measured = context.number('resume.temperature');
+  const min = Number(context.state.plan.procedure.preheatF.min);
+  return judgeRange(context, { ...frame, measured, min, unit: 'degF' });
+};
+
+const judgeCracks = (context: PointContext, stoppedAt: string): Verdict[] => {
+  const looked = since(context, 'resume.cracks', stoppedAt);
+  return judgeFact(context, {
+    limit: 'resume-cracks',
+    kind: 'stop',
+    about: ['resume.cracks'],
+    source: commonPractice,
+    says: looked ? 'resume-cracks' : 'resume-cracks-unread',
+    holds: looked && context.value('resume.cracks') === 'none',
+  });
+};
+
 /**
  * What must hold before stopped work is resumed, judged at `at`: fresh air and permit; on a hot joint fresh preheat
  * and no crack seen since the stop.
@@ -50,24 +77,5 @@ export const judgeResume = (state: JobState, at: string): Verdict[] => {
   const stoppedAt = state.stopped.at.corrected;
   const air = released(state, 'hot-work-clearance') ? judgeFlame(context, at) : [];
   if (!jointIsHot(state)) return air;
-  const { preheatF } = state.plan.procedure;
-  return [
-    ...air,
-    ...judgeRange(context, {
-      limit: 'resume-preheat',
-      kind: 'stop',
-      about: ['resume.temperature'],
-      measured: since(context, 'resume.temperature', stoppedAt) ? context.number('resume.temperature') : -460,
-      min: Number(preheatF.min),
-      unit: 'degF',
-      source: byProcedure(context),
-    }),
-    ...judgeFact(context, {
-      limit: 'resume-cracks',
-      kind: 'stop',
-      about: ['resume.cracks'],
-      source: commonPractice,
-      holds: since(context, 'resume.cracks', stoppedAt) && context.value('resume.cracks') === 'none',
-    }),
-  ];
+  return [...air, ...judgeHeat(context, stoppedAt), ...judgeCracks(context, stoppedAt)];
 };

@@ -68,4 +68,20 @@ export default {
     within: '{name} is in calibration until {until}.',
     outside: '{name} ran out of calibration on {until}. A gas meter out of date is not used: take one that is in date.',
   },
+  'resume-preheat': {
+    within: 'The joint is {measured}, not below {min}.',
+    outside: 'The joint is {measured}, {by} under the preheat minimum of {min}. Heat it again all round and read it again.',
+  },
+  'resume-preheat-unread': {
+    within: 'The joint has been read since the stop.',
+    outside: 'The joint’s temperature has not been read since the stop, or nobody can be sure when. Read it now.',
+  },
+  'resume-cracks': {
+    within: 'No crack was seen since the stop.',
+    outside: 'A crack was found in the joint. Nothing goes over it: take it out by the procedure, look again and record it.',
+  },
+  'resume-cracks-unread': {
+    within: 'The joint has been looked at since the stop.',
+    outside: 'The joint has not been looked at for cracks since the stop, or nobody can be sure when. Look now and record it.',
+  },
 };
