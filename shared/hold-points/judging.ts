@@ -54,12 +54,11 @@ export const judgeRange = (
     min?: number;
     max?: number;
     exclusiveMax?: boolean;
-    exclusiveMin?: boolean;
   },
 ): Verdict[] => {
   const { measured, min, max, unit } = frame;
   if (measured === undefined || !Number.isFinite(measured)) return [];
-  const low = min !== undefined && (frame.exclusiveMin ? measured <= min + slack : measured < min - slack) ? min - measured : null;
+  const low = min !== undefined && measured < min - slack ? min - measured : null;
   const high = max !== undefined && (frame.exclusiveMax ? measured >= max - slack : measured > max + slack) ? measured - max : null;
   const by = low ?? high;
   const outcome = by === null ? 'within' : 'outside';
@@ -78,6 +77,7 @@ export const judgeRange = (
       allowed: {
         min: min === undefined ? null : toDecimal(min),
         max: max === undefined ? null : toDecimal(max),
+        ...(frame.exclusiveMax ? { below: true as const } : {}),
         unit,
       },
       by: by === null ? null : { value: toDecimal(Math.max(by, 0)), unit },

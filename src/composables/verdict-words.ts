@@ -17,13 +17,14 @@ export function useVerdictWords(): VerdictWords {
 
   const limit = ({ allowed }: Verdict): string => {
     if (allowed === null) return '';
-    const { min, max, unit } = allowed;
+    const { min, max, below, unit } = allowed;
     if (min !== null && max !== null)
       return min === max
         ? quantity(min, unit)
         : say('job.point.range', { min: quantity(min, unit), max: quantity(max, unit) });
     if (min !== null) return say('job.point.atLeast', { min: quantity(min, unit) });
-    return max === null ? '' : say('job.point.atMost', { max: quantity(max, unit) });
+    if (max === null) return '';
+    return say(below ? 'job.point.below' : 'job.point.atMost', { max: quantity(max, unit) });
   };
 
   const source = ({ kind, ref }: Source): string => {

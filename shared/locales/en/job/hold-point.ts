@@ -36,6 +36,7 @@ export default {
   range: '{min} to {max}',
   atLeast: '{min} or more',
   atMost: '{max} or less',
+  below: 'below {max}',
   source: {
     job: 'this job’s programme',
     'job-setting': 'this job’s setting',
