@@ -75,8 +75,9 @@ const needed: readonly Role[] = ['welder', 'company_rep', 'tool_pusher'];
 export const decideRemovePerson: Decider<'remove-person'> = (input) => {
   const { accountId, role, reason } = input.command.body;
   const { people } = input.state;
-  if (!people.some((one) => one.accountId === accountId && one.role === role)) return refuse('person-not-on-job');
+  const person = people.find((one) => one.accountId === accountId && one.role === role);
+  if (!person) return refuse('person-not-on-job');
   const others = people.filter((one) => one.role === role && one.accountId !== accountId);
   if (needed.includes(role) && others.length === 0) return refuse('last-of-role');
-  return accept(event(input, 'person-removed', { accountId, role, reason }));
+  return accept(event(input, 'person-removed', { accountId, name: person.name, role, reason }));
 };

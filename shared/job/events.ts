@@ -78,7 +78,7 @@ interface EventBodies {
   'terms-changed': { terms: Terms; reason: string; signature: Signature | null };
   'shift-handed-over': { line: string; to: string | null };
   'person-assigned': { person: JobPerson };
-  'person-removed': { accountId: string; role: Role; reason: string };
+  'person-removed': { accountId: string; name: string; role: Role; reason: string };
   'job-called-off': { reason: string; signature: Signature };
   'job-sealed': { concessions: number; signature: Signature };
 }

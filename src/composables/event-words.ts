@@ -77,8 +77,8 @@ export function useEventWords(): (event: JobEvent) => string {
         return { key, params: { name, role: { key: `app.role.${role}` } } };
       }
       case 'person-removed': {
-        const { accountId, role, reason } = event.body;
-        return { key, params: { name: accountId, role: { key: `app.role.${role}` }, reason } };
+        const { name, role, reason } = event.body;
+        return { key, params: { name, role: { key: `app.role.${role}` }, reason } };
       }
       case 'job-sealed':
         return { key, params: { count: event.body.concessions } };
