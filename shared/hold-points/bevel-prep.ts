@@ -1,5 +1,6 @@
 import { odTolerance, odToleranceInfo } from '../calculations/od-tolerance';
 import { outOfRoundness, outOfRoundnessInfo } from '../calculations/out-of-roundness';
+import { toDecimal } from '../units/decimal';
 import { answer, computed } from './computing';
 import type { PointContext } from './context';
 import type { FieldDefinition, PointDefinition } from './definition';
@@ -34,6 +35,15 @@ const odQuantities = (context: PointContext): FieldDefinition[] => {
   return odPlaces(context).flatMap((place) => odFields(place).map((field) => quantity(field, 'in', { likely })));
 };
 
+/** A caliper reads thousandths: the ends of the tolerance are shown so, and not as marks of a tape between which they lie. */
+const inThousandths = (verdict: Verdict): Verdict => {
+  if (verdict.allowed === null) return verdict;
+  const { unit, ...ends } = verdict.allowed;
+  const [min, max] = [toDecimal(Number(ends.min), 3), toDecimal(Number(ends.max), 3)];
+  const params = { ...verdict.text.params, min: { quantity: min, unit }, max: { quantity: max, unit } };
+  return { ...verdict, allowed: { min, max, unit }, text: { ...verdict.text, params } };
+};
+
 /** The pipe's own tolerance; none is published for sizes under 4-1/2 in. */
 const judgeOd = (context: PointContext): Verdict[] => {
   const nominalOdIn = Number(context.state.plan.casing.odIn);
@@ -52,7 +62,7 @@ const judgeOd = (context: PointContext): Verdict[] => {
         unit: 'in',
         source: standard('API 5CT'),
         says: 'casing-od',
-      }),
+      }).map(inThousandths),
     );
 };
 
