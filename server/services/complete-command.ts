@@ -1,7 +1,7 @@
 import type { EntityManager } from 'typeorm';
 import type { Command, CommandOf, RecordEntry } from '../../shared/contracts/commands';
 import { settingNames } from '../../shared/job/plan';
-import type { Head, Settings } from '../../shared/job/plan';
+import type { Head, Instrument, Settings } from '../../shared/job/plan';
 import type { JobState } from '../../shared/job/state';
 import { Account } from '../entities/account';
 import { filesUploadedBy } from './files-uploaded-by';
@@ -18,7 +18,7 @@ export interface Standing {
 
 /**
  * Puts the server's own knowledge in the place of what a caller claims: a photo's pixels, a person's name and
- * qualifications, a head's dimensions, where a setting comes from. Everything else goes to the rules as it came.
+ * qualifications, a head's dimensions, an instrument's calibration, where a setting comes from. Everything else goes to the rules as it came.
  */
 export async function completeCommand(
   manager: EntityManager,
@@ -40,6 +40,11 @@ export async function completeCommand(
       const found = await findJobPerson(manager, accountId, role);
       if (!found.ok) return turned(422, `command.${found.fault}`);
       return { ok: true, command: { ...command, body: { person: found.person } } };
+    }
+    case 'add-instrument': {
+      const instrument = await findCatalogueItem<Instrument>(manager, 'instrument', command.body.instrument.id);
+      if (!instrument) return turned(422, 'command.instrument-unknown');
+      return { ok: true, command: { ...command, body: { instrument } } };
     }
     case 'set-again': {
       const head = await findCatalogueItem<Head>(manager, 'head', command.body.head.id);

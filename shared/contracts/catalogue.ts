@@ -35,4 +35,13 @@ export const readCatalogue = defineRoute({
   summary: 'Operators with rigs, heads, procedures, instruments and people for a new job',
 });
 
-export const catalogueRoutes = [readCatalogue];
+/** Heads alone, for who sets one again: people, procedures and instruments are the firm's own and no guest's. */
+export const readHeads = defineRoute({
+  method: 'get',
+  path: '/api/heads',
+  permission: 'heads.read',
+  response: z.strictObject({ heads: catalogueSchema.shape.heads }),
+  summary: 'The casing heads in use, for a head that is set again',
+});
+
+export const catalogueRoutes = [readCatalogue, readHeads];

@@ -101,6 +101,15 @@ const jobPerson = z.strictObject({
   qualifications: z.array(z.strictObject({ process: short, lastUsed: z.iso.date() })).max(20),
 });
 
+const instrument = z.strictObject({
+  id: short,
+  kind: z.enum(['gas-meter', 'tape', 'level', 'pyrometer', 'gauge', 'recorder']),
+  name: short,
+  serial: short,
+  calibratedUntil: z.iso.date(),
+  fullScalePsi: z.int().positive().nullable(),
+});
+
 /** The whole plan as the first event holds it; the server fills it from its own tables, never from the caller. */
 export const jobPlanSchema = z.strictObject({
   operator: z.strictObject({ id: short, name: short }),
@@ -121,18 +130,7 @@ export const jobPlanSchema = z.strictObject({
   }),
   head,
   procedure,
-  instruments: z
-    .array(
-      z.strictObject({
-        id: short,
-        kind: z.enum(['gas-meter', 'tape', 'level', 'pyrometer', 'gauge', 'recorder']),
-        name: short,
-        serial: short,
-        calibratedUntil: z.iso.date(),
-        fullScalePsi: z.int().positive().nullable(),
-      }),
-    )
-    .max(40),
+  instruments: z.array(instrument).max(40),
   people: z.array(jobPerson).min(1).max(40),
   terms,
   proposedDirection: short.nullable(),
@@ -152,6 +150,7 @@ const bodies = {
     takenAt: instant.nullable(),
   }),
   'set-photo-aside': z.strictObject({ point: pointId, photo: z.string().max(80), reason }),
+  'strike-row': z.strictObject({ point: pointId, group: fieldKey, row: z.int().min(1).max(999), reason }),
   'begin-act': z.strictObject({ point: pointId, act: fieldKey }),
   'end-act': z.strictObject({ point: pointId, act: fieldKey }),
   present: z.strictObject({ point: pointId, ...signedContent }),
@@ -178,6 +177,7 @@ const bodies = {
   'resume-work': z.strictObject({ note: reason, ...signedContent }),
   'change-terms': z.strictObject({ terms, reason, ...signedContent }),
   'hand-over': z.strictObject({ line: reason, to: short.nullable() }),
+  'add-instrument': z.strictObject({ instrument }),
   'assign-person': z.strictObject({ person: jobPerson }),
   'remove-person': z.strictObject({ accountId: z.uuid(), role: jobPerson.shape.role, reason }),
   'call-off': z.strictObject({ reason, ...signedContent }),
@@ -210,6 +210,7 @@ export const commandSchema = z.discriminatedUnion('type', [
   commandOf('record'),
   commandOf('add-photo'),
   commandOf('set-photo-aside'),
+  commandOf('strike-row'),
   commandOf('begin-act'),
   commandOf('end-act'),
   commandOf('present'),
@@ -226,6 +227,7 @@ export const commandSchema = z.discriminatedUnion('type', [
   commandOf('resume-work'),
   commandOf('change-terms'),
   commandOf('hand-over'),
+  commandOf('add-instrument'),
   commandOf('assign-person'),
   commandOf('remove-person'),
   commandOf('call-off'),

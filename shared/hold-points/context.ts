@@ -2,6 +2,7 @@ import { clockDoubtLimitMs, clockIsDoubtful } from '../job/actor';
 import type { JobState, PointState, Reading } from '../job/state';
 import type { Instrument, ProcedurePass, SettingName } from '../job/plan';
 import type { PointKind } from './points';
+import { rowsInUse, stands } from './rows';
 
 /** What a definition may look at: the job as it stands and one of its points. No clock. */
 export interface PointContext {
@@ -24,13 +25,13 @@ export interface PointContext {
 }
 
 /**
- * The reading of a field that counts: the one taken last, late ones left aside. Two devices send when they have a
+ * The reading of a field that counts: the one taken last, late and struck ones left aside. Two devices send when they have a
  * signal, so what arrives last may have been taken first; only where a clock is in doubt the order of arrival decides.
  */
 export const readingThatCounts = (readings: readonly Reading[] | undefined): Reading | undefined => {
   let counts: Reading | undefined;
   for (const one of readings ?? []) {
-    if (one.late) continue;
+    if (!stands(one)) continue;
     const older =
       counts !== undefined &&
       !clockIsDoubtful(counts.at) &&
@@ -71,14 +72,7 @@ export const contextOf = (state: JobState, point: PointState): PointContext => {
       const parsed = Number(raw);
       return Number.isFinite(parsed) ? parsed : undefined;
     },
-    rows: (group) => {
-      const found = new Set<number>();
-      for (const [key, readings] of Object.entries(point.readings)) {
-        const match = key.startsWith(`${group}.`) ? /^(\d+)\./.exec(key.slice(group.length + 1)) : null;
-        if (match && readings.some((reading) => !reading.late)) found.add(Number(match[1]));
-      }
-      return [...found].sort((a, b) => a - b);
-    },
+    rows: (group) => rowsInUse(point.readings, group),
     other: (kind) => {
       const found = lastOf(state.points, (one) => one.place.kind === kind);
       return found ? contextOf(state, found) : undefined;

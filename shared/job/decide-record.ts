@@ -10,6 +10,7 @@ import type { RecordEntry } from '../contracts/commands';
 import { clockIsDoubtful, samePerson, type PersonRef, type Times } from './actor';
 import { accept, event, pointNamed, refuse, type Decider, type Decision, type Deciding } from './decision';
 import type { RecordedEntry } from './events';
+import { strikeOver } from './decide-strike';
 import { runningAct } from './points';
 import type { JobState, PointState } from './state';
 import { understand } from './understand';
@@ -133,6 +134,8 @@ export const decideRecord: Decider<'record'> = (input) => {
   if (read.every(({ field }) => field.site)) return recordAtSite(input);
   const standing = settingOver(state, at) ?? standingOf(point, at.corrected);
   if (isDecision(standing)) return standing;
+  const struck = strikeOver(point, read.map(({ field }) => field.key));
+  if (struck) return refuse('row-struck', { since: struck });
   const wrongHand = secondHandWrong(read, review.fields, (field) => review.context.read(field)?.measuredBy);
   if (wrongHand) return wrongHand;
   const recorded = event(input, 'readings-recorded', {

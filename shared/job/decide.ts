@@ -5,9 +5,11 @@ import { commandGrants } from '../permissions/commands';
 import type { Times } from './actor';
 import { accept, event, refuse, type Decider, type Decision, type Deciding, type JobActor } from './decision';
 import { decideCallOff, decideOpenRepairRound, decideResumeWork, decideSeal, decideSetAgain, decideStopWork } from './decide-failure';
+import { decideAddInstrument } from './decide-instrument';
 import { decideAssignPerson, decideChangeTerms, decideHandOver, decideNameDirection, decideProposeDirection, decideRemovePerson } from './decide-people';
 import { decidePresent, decideWithdraw } from './decide-present';
 import { decideAddPhoto, decideBeginAct, decideEndAct, decideRecord, decideSetPhotoAside } from './decide-record';
+import { decideStrikeRow } from './decide-strike';
 import { decideConcede, decideRelease, decideReopen, decideSendBack } from './decide-release';
 import { planRefused } from './plan-refused';
 import { withTrueSources } from './settings';
@@ -19,6 +21,7 @@ const deciders: { [T in Running]: Decider<T> } = {
   record: decideRecord,
   'add-photo': decideAddPhoto,
   'set-photo-aside': decideSetPhotoAside,
+  'strike-row': decideStrikeRow,
   'begin-act': decideBeginAct,
   'end-act': decideEndAct,
   present: decidePresent,
@@ -35,6 +38,7 @@ const deciders: { [T in Running]: Decider<T> } = {
   'resume-work': decideResumeWork,
   'change-terms': decideChangeTerms,
   'hand-over': decideHandOver,
+  'add-instrument': decideAddInstrument,
   'assign-person': decideAssignPerson,
   'remove-person': decideRemovePerson,
   'call-off': decideCallOff,

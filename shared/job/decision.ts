@@ -75,7 +75,9 @@ export const jobContentMoved = (
 /** Who touched a point's evidence last, so that the loser of a race is told. */
 export const lastChangeOf = (state: JobState, point: PointState): { by: ActorStamp; at: Times } | null => {
   const all = [
-    ...Object.values(point.readings).flat().map((one) => ({ by: one.typedBy, at: one.at })),
+    ...Object.values(point.readings)
+      .flat()
+      .flatMap((one) => [{ by: one.typedBy, at: one.at }, ...(one.struck ? [one.struck] : [])]),
     ...Object.values(state.site).flat().map((one) => ({ by: one.typedBy, at: one.at })),
     ...point.photos.flatMap((one) => (one.setAside ? [one, one.setAside] : [one])),
     ...point.concessions,

@@ -3,7 +3,7 @@ import type { PointId } from '../hold-points/points';
 import type { Role } from '../permissions/roles';
 import type { Shown } from '../contracts/commands';
 import type { ActorStamp, PersonRef, Times } from './actor';
-import type { Head, JobPerson, JobPlan, Terms } from './plan';
+import type { Head, Instrument, JobPerson, JobPlan, Terms } from './plan';
 
 /** What a signature says and what it is bound to (printed name, time and meaning stand in every form of the record). */
 export interface Signature {
@@ -50,6 +50,7 @@ interface EventBodies {
     late: boolean;
   };
   'photo-set-aside': { point: PointId; photo: string; reason: string };
+  'row-struck': { point: PointId; group: string; row: number; readings: string[]; reason: string };
   'act-begun': { point: PointId; act: string; verdicts: Verdict[] };
   'act-ended': { point: PointId; act: string };
   'point-presented': { point: PointId; contentHash: string; judged: AsJudged };
@@ -77,6 +78,7 @@ interface EventBodies {
   'work-resumed': { note: string; verdicts: Verdict[]; signature: Signature };
   'terms-changed': { terms: Terms; reason: string; signature: Signature | null };
   'shift-handed-over': { line: string; to: string | null };
+  'instrument-added': { instrument: Instrument };
   'person-assigned': { person: JobPerson };
   'person-removed': { accountId: string; name: string; role: Role; reason: string };
   'job-called-off': { reason: string; signature: Signature };

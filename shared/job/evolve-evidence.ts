@@ -38,6 +38,7 @@ const recorded = (state: JobState, event: JobEventOf<'readings-recorded'>): JobS
     typedBy: actor,
     at,
     late: isLate,
+    struck: null,
   });
   const ofSite = entries.filter((entry) => entry.site).map((entry) => asReading(entry, false));
   const ofPoint = entries.filter((entry) => !entry.site).map((entry) => asReading(entry, late));
@@ -49,11 +50,23 @@ const recorded = (state: JobState, event: JobEventOf<'readings-recorded'>): JobS
   };
 };
 
+const rowStruck = (state: JobState, event: JobEventOf<'row-struck'>): JobState => {
+  const { point, readings, reason, actor, at } = event.body;
+  const named = new Set(readings);
+  const strike = (one: Reading): Reading => (named.has(one.id) ? { ...one, struck: { reason, by: actor, at } } : one);
+  return changePoint(state, point, (one) => ({
+    ...one,
+    readings: Object.fromEntries(Object.entries(one.readings).map(([field, all]) => [field, all.map(strike)])),
+  }));
+};
+
 /** Evidence arrives: readings, photos, acts, concessions. Nothing that was there is taken away. */
 export const evolveEvidence = (state: JobState, event: JobEvent): JobState => {
   switch (event.type) {
     case 'readings-recorded':
       return recorded(state, event);
+    case 'row-struck':
+      return rowStruck(state, event);
     case 'photo-added': {
       const { photo, shot, sha256, previewSha256, width, height, takenAt, late, actor, at, point } = event.body;
       const added = { id: photo, shot, sha256, previewSha256, width, height, takenAt, late, by: actor, at, setAside: null };

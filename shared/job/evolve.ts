@@ -64,6 +64,10 @@ const evolveJob = (state: JobState, event: JobEvent): JobState => {
       const { line, to, actor, at } = event.body;
       return { ...state, handovers: [...state.handovers, { line, to, by: actor, at }] };
     }
+    case 'instrument-added': {
+      const instruments = [...state.plan.instruments, event.body.instrument];
+      return { ...state, plan: { ...state.plan, instruments } };
+    }
     case 'person-assigned':
       return { ...state, people: [...state.people, event.body.person] };
     case 'person-removed': {

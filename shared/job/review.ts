@@ -3,6 +3,7 @@ import type { ActDefinition, FieldDefinition, GroupDefinition, ShotDefinition } 
 import { templateKey } from '../hold-points/definition';
 import { definitionOf } from '../hold-points/definitions';
 import { generalVerdicts } from '../hold-points/general';
+import { rowPrefix, rowsAsked } from '../hold-points/rows';
 import type { Computed, Verdict } from '../hold-points/verdict';
 import type { Concession, JobState, Photo, PointState } from './state';
 
@@ -41,13 +42,10 @@ const rowKey = (key: string, row: number): string => key.replace('.#.', `.${row}
 const placeFields = (context: PointContext, groups: GroupDefinition[]): PlacedField[] =>
   groups.flatMap((group): PlacedField[] => {
     if (!group.rows) return group.fields.map((field) => ({ ...field, group: group.key, row: null }));
-    const prefix = group.fields[0]?.key.split('.#.')[0] ?? group.key;
-    const used = context.rows(prefix);
-    const last = Math.max(group.rows.min, ...used);
-    const rows = Array.from({ length: last }, (_, index) => index + 1);
-    return rows
-      .filter((row) => used.includes(row) || row <= Math.max(group.rows?.min ?? 0, 0))
-      .flatMap((row) => group.fields.map((field) => ({ ...field, key: rowKey(field.key, row), group: group.key, row })));
+    const rows = rowsAsked(context.point.readings, rowPrefix(group), group.rows.min);
+    return rows.flatMap((row) =>
+      group.fields.map((field) => ({ ...field, key: rowKey(field.key, row), group: group.key, row })),
+    );
   });
 
 const standing = (photos: Photo[]): Photo[] => photos.filter((photo) => photo.setAside === null && !photo.late);

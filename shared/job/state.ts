@@ -21,6 +21,8 @@ export interface Reading {
   at: Times;
   /** arrived after the release that it came too late for */
   late: boolean;
+  /** its row was begun by mistake: it stays on record and counts no more */
+  struck: { reason: string; by: ActorStamp; at: Times } | null;
 }
 
 export interface Photo {

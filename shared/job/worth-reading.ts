@@ -2,6 +2,7 @@ import type { PointPlace } from '../hold-points/points';
 import type { Verdict } from '../hold-points/verdict';
 import { minutesBetween } from './actor';
 import type { JobEvent } from './events';
+import { strikesIn } from '../hold-points/rows';
 import type { Chapter, Story } from './story';
 
 /** What an outsider looks at first, in the order of weight. */
@@ -16,6 +17,7 @@ export const worthKinds = [
   'instruments',
   'late',
   'photos-aside',
+  'rows-struck',
   'terms',
   'soonest',
 ] as const;
@@ -141,6 +143,12 @@ export const worthReading = (story: Story, events: readonly JobEvent[]): Worth[]
       'photos-aside',
       standing.flatMap(({ setting, chapter: { point } }) =>
         point.photos.flatMap((photo) => (photo.setAside ? [item(setting, point.place, photo.setAside.reason)] : [])),
+      ),
+    ),
+    counted(
+      'rows-struck',
+      standing.flatMap(({ setting, chapter: { point } }) =>
+        strikesIn(point).map(({ reason }) => item(setting, point.place, reason)),
       ),
     ),
     fromEvents(events, 'terms', (event) => (event.type === 'terms-changed' ? event.body.reason : null)),

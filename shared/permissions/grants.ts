@@ -18,6 +18,7 @@ const houseGrants = {
   'packet.list': ['welder', 'company_rep', 'tool_pusher', 'auditor', 'coordinator'],
   'desk.read': ['company_rep', 'tool_pusher'],
   'catalogue.read': ['welder', 'coordinator'],
+  'heads.read': ['company_rep', 'coordinator'],
   'account.self': ['welder', 'company_rep', 'tool_pusher', 'auditor', 'coordinator'],
 } as const satisfies Record<string, readonly Role[]>;
 

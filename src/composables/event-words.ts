@@ -72,6 +72,14 @@ export function useEventWords(): (event: JobEvent) => string {
         const { line, to } = event.body;
         return to === null ? { key, params: { line } } : { key: `${key}-to`, params: { line, to } };
       }
+      case 'row-struck': {
+        const { point, row, reason } = event.body;
+        return { key, params: { title: title(point), row, reason } };
+      }
+      case 'instrument-added': {
+        const { name, serial } = event.body.instrument;
+        return { key, params: { name, serial } };
+      }
       case 'person-assigned': {
         const { name, role } = event.body.person;
         return { key, params: { name, role: { key: `app.role.${role}` } } };

@@ -33,6 +33,14 @@ describe('the catalogue', () => {
     }
   });
 
+  it('shows its heads, and nothing else, to who may set one again', async () => {
+    const agent = await test.agentFor('companyRep');
+    const { body } = await agent.get('/api/heads').expect(200);
+    expect(Object.keys(body)).toEqual(['heads']);
+    const { body: whole } = await (await test.agentFor('coordinator')).get('/api/catalogue');
+    expect(body.heads).toEqual(whole.heads);
+  });
+
   it.each(['companyRep', 'toolPusher', 'auditor'] as const)('is not for the %s', async (key) => {
     const agent = await test.agentFor(key);
     await agent.get('/api/catalogue').expect(403);

@@ -5,7 +5,7 @@ import { AccountRole } from '../../server/entities/account-role';
 import type { DemoKey } from '../../server/demo/people';
 import type { Planning } from '../../shared/contracts/jobs';
 import type { JobPlan } from '../../shared/job/plan';
-import { aJobOn, browserOf } from '../support/a-job-on';
+import { aJobOn, browserOf, sha256 } from '../support/a-job-on';
 import { aPlanning } from '../support/a-planning';
 import { startTestApp } from '../support/test-app';
 import type { TestApp } from '../support/test-app';
@@ -154,6 +154,26 @@ describe('a photo', () => {
     };
     const answer = await job.send('welder', 'add-photo', body);
     expect([answer.status, answer.body.code]).toEqual([422, 'command.file-not-sent']);
+  });
+});
+
+describe('a recorder’s file', () => {
+  it('is no photo, and is said to be none', async () => {
+    const job = await aJobOn(on);
+    const bytes = Buffer.from('time,pressure\n12:00,1500\n12:05,1499\n');
+    const agent = await browserOf(on, 'welder');
+    const address = `/api/jobs/${job.id}/files/${sha256(bytes)}`;
+    await agent.put(address).set('Content-Type', 'text/csv').send(bytes).expect(200);
+    const photo = await job.upload('welder');
+    const size = { width: 1, height: 1, takenAt: null };
+    const named = { point: 'hot-work-clearance', shot: 'meter-at-cellar', ...size };
+    for (const files of [
+      { sha256: sha256(bytes), previewSha256: null },
+      { sha256: photo, previewSha256: sha256(bytes) },
+    ]) {
+      const answer = await job.send('welder', 'add-photo', { ...named, ...files });
+      expect([answer.status, answer.body.code]).toEqual([422, 'command.file-no-photo']);
+    }
   });
 });
 

@@ -69,6 +69,7 @@ const aReading = (point: string, field: string, index: number, spec: ReadingSpec
   typedBy: { ...welder, role: 'welder' },
   at: timesAt(spec.at ?? noon, spec.doubtMs === undefined ? 500 : spec.doubtMs),
   late: spec.late ?? false,
+  struck: null,
 });
 
 const readingsOf = (point: string, specs: ReadingSpecs = {}): Record<string, Reading[]> =>

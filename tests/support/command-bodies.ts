@@ -1,6 +1,7 @@
 import type { CommandOf, CommandType } from '../../shared/contracts/commands';
-import type { Head } from '../../shared/job/plan';
+import type { Head, Instrument } from '../../shared/job/plan';
 import { demoHeads } from '../../server/demo/heads';
+import { demoInstruments } from '../../server/demo/instruments';
 import { demoPeopleByKey } from '../../server/demo/people';
 import { aPlan } from './a-plan';
 import { sha256, shown } from './a-job-on';
@@ -8,6 +9,7 @@ import { sha256, shown } from './a-job-on';
 const first = 'hot-work-clearance';
 const signed = { contentHash: sha256('nothing'), shown };
 const reason = 'Because it is so';
+const anInstrument = demoInstruments(new Date('2026-09-14'))[0] as Instrument;
 const nobody = '01940000-0000-7000-8000-0000000000ff';
 
 /** A well-formed body of every command, which a job that is only planned mostly refuses: what is asked is who may. */
@@ -24,6 +26,7 @@ export const commandBodies: { [T in CommandType]: CommandOf<T>['body'] } = {
     takenAt: null,
   },
   'set-photo-aside': { point: first, photo: 'none', reason },
+  'strike-row': { point: first, group: 'rods', row: 1, reason },
   'begin-act': { point: first, act: 'no-such-act' },
   'end-act': { point: first, act: 'no-such-act' },
   present: { point: first, ...signed },
@@ -40,6 +43,7 @@ export const commandBodies: { [T in CommandType]: CommandOf<T>['body'] } = {
   'resume-work': { note: reason, ...signed },
   'change-terms': { terms: aPlan().terms, reason, ...signed },
   'hand-over': { line: reason, to: null },
+  'add-instrument': { instrument: { ...anInstrument, id: nobody } },
   'assign-person': { person: { accountId: nobody, name: 'Nobody', role: 'welder', qualifications: [] } },
   'remove-person': { accountId: demoPeopleByKey.auditor.id, role: 'welder', reason },
   'call-off': { reason, ...signed },

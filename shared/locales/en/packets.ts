@@ -14,7 +14,6 @@ export default {
   nothing: 'No packet has all of these words.',
   nothingWhy: 'Try fewer words: a well, a rig, an operator, a casing size.',
   more: 'More',
-  endedAt: '{at}',
   of: '{rig}, {operator}',
   pipe: '{casing}. Head {head}',
   concessions: { one: '1 concession', other: '{count} concessions' },
@@ -58,7 +57,6 @@ export default {
     photosRunning: '{done} of {total} files recomputed',
     photosHold: '{files} recomputed: each is what was hashed.',
     photosBroken: '{files} missing or not what was hashed: {hashes}',
-    none: 'Nothing could be checked here.',
   },
   worth: {
     title: 'Worth reading',
@@ -73,6 +71,7 @@ export default {
     instrumentsNone: 'instruments out of date',
     late: { one: 'late entry', other: 'late entries' },
     'photos-aside': { one: 'photo set aside', other: 'photos set aside' },
+    'rows-struck': { one: 'row of readings struck', other: 'rows of readings struck' },
     terms: { one: 'change of terms', other: 'changes of terms' },
     soonest: '{minutes} min',
     soonestSays: 'from presented to released, the shortest: {title}',

@@ -19,6 +19,8 @@ export default {
   'of-earlier-setting': 'This was taken before the head was set again. It belongs to the first setting: take it anew.',
   'no-such-shot': 'This hold point does not ask for the photo {shot}. Load the page again.',
   'no-such-photo': 'This photo does not count any more: it has been set aside.',
+  'no-such-row': 'Nothing that counts stands in row {row}, so there is nothing to strike.',
+  'row-struck': 'This row was struck. Record it in a row of its own.',
   'no-such-act': 'This hold point has no such act. Load the page again.',
   'act-not-ready': 'This cannot begin yet. What stands in the way is listed below.',
   'act-running': 'Something is still running. End it before the next begins.',
@@ -47,6 +49,8 @@ export default {
   'terms-in-use': 'A released hold point was judged by these terms. Reopen that hold point before they change.',
   'terms-need-signature':
     'Hold points have been released by these terms, so only the company representative changes them now.',
+  'instrument-already-listed': '{name} is on this job’s list already.',
+  'instruments-full': 'A job lists {most} instruments at most.',
   'person-not-on-job': 'This person does not hold that role on the job.',
   'role-already-held': '{name} holds this role on the job already.',
   'roles-not-together': '{name} stands on the other side of this job already: who does the work never accepts it.',

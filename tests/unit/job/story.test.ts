@@ -106,6 +106,7 @@ describe('what is worth reading', () => {
       instruments: 0,
       late: 1,
       'photos-aside': 1,
+      'rows-struck': 0,
       terms: 1,
     });
   });
