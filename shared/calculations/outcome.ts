@@ -1,4 +1,4 @@
-/** Why a calculation has no answer. The words for each stand under the same key in the messages. */
+/** Why a calculation has no answer: a code for whoever called it; what a person is told is a limit's own sentence. */
 export type RefusalReason =
   | 'not-a-number'
   | 'below-range'

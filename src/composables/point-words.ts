@@ -56,8 +56,9 @@ export function usePointWords(place: MaybeRefOrGetter<PointPlace>): PointWords {
     caution: (key) => find('cautions', key),
     computed: (key) => find('computed', key),
     choice: (field, value) => {
-      if (/^\d+$/.test(value)) return value;
-      return find('choices', `${withoutRow(field)}.${value}`);
+      const words = find('choices', `${field}.${value}`);
+      // two bolt holes or a row's number have no words of their own
+      return /^\d+$/.test(value) && words.startsWith('points.') ? value : words;
     },
     missing: (key) => {
       const [what, ...rest] = key.split(':');
@@ -66,7 +67,7 @@ export function usePointWords(place: MaybeRefOrGetter<PointPlace>): PointWords {
       if (what === 'act') return words.act(name);
       if (what === 'act-end') return say('job.point.next.end', { label: words.act(name) });
       if (what === 'statement') return words.statement(name);
-      if (what === 'term') return say(has(`job.settings.${name}`) ? `job.settings.${name}` : `job.terms.names.${name}`);
+      if (what === 'term') return say(has(`settings.${name}`) ? `settings.${name}` : `job.terms.names.${name}`);
       return what === 'field' ? words.field(name) : name;
     },
   };

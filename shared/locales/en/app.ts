@@ -43,7 +43,6 @@ export default {
     back: 'Back',
   },
   connection: {
-    here: 'Connected',
     sent: 'Connected, all sent',
     gone: 'No signal',
     goneWaiting: { one: 'No signal, 1\u00a0waits to be sent', other: 'No signal, {count}\u00a0wait to be sent' },
@@ -57,11 +56,6 @@ export default {
   retry: 'Try again',
   cancel: 'Cancel',
   close: 'Close',
-  show: 'Show',
-  hide: 'Hide',
-  busy: 'Working',
-  saved: 'Saved.',
-  optional: 'not required',
   understood: 'Read as {value}',
   sign: {
     pin: 'Signing PIN',

@@ -3,7 +3,6 @@ import app from './app';
 import commandErrors from './command-errors';
 import errors from './errors';
 import fileRefusals from './file-refusals';
-import calculations from './calculations';
 import photos from './photos';
 import desk from './desk';
 import drawing from './drawing';
@@ -23,8 +22,12 @@ import signature from './signature';
 export default {
   account,
   app,
-  errors: { ...errors, ...fileRefusals, command: commandErrors.command, field: { ...errors.field, ...commandErrors.field } },
-  calculations,
+  errors: {
+    ...errors,
+    ...fileRefusals,
+    command: commandErrors.command,
+    field: { ...errors.field, ...commandErrors.field },
+  },
   photos,
   desk,
   drawing,

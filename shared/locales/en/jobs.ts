@@ -7,7 +7,6 @@ export default {
   waits: 'Waits for the {role}, {since}',
   waitsYou: 'Waits for you, {since}',
   allReleased: 'Every hold point is released. Ready to seal.',
-  ended: 'Finished',
   hot: 'Hot joint',
   stopped: 'Work stopped',
   concessions: { one: '1 concession', other: '{count} concessions' },

@@ -1,8 +1,5 @@
 /** Photos: taking one, its small and its large view. */
 export default {
-  prepare: {
-    noPreview: 'This browser cannot show the photo. The original is kept and sent as it is.',
-  },
   thumb: {
     open: 'Show large: {name}',
     noPreview: 'No preview',

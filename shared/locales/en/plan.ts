@@ -55,9 +55,6 @@ export default {
     instrumentIds: 'Instruments',
   },
   hint: {
-    rigId: 'Rigs stand under their operator.',
-    rigFirst: 'Choose the operator first.',
-    zone: 'Every printed time is on this clock.',
     casing: 'Search by diameter, weight or grade: 9 5/8 40 J55.',
     targetHeightIn: 'As it is said: 6, 14 3/8, 1\' 2 3/8" or 365 mm. Below ground with a minus.',
     standOffIn: 'Room between the end of the casing and the landing shoulder.',
@@ -66,7 +63,6 @@ export default {
     rated: 'Left open it is {value}, by {source}.',
     source: 'Needed when a rating is typed: mill certificate, data sheet.',
     settings: 'Left open, common practice stands. What is typed is the operator’s programme’s.',
-    weight: 'As the pipe is named.',
   },
   need: {
     operatorId: 'Choose the operator.',
@@ -165,8 +161,6 @@ export default {
     serial: '{name}, {serial}',
   },
   settings: {
-    name: 'Limit',
-    usual: 'Common practice',
     own: 'Operator’s programme',
     show: {
       one: 'Show all limits, 1 of them the programme’s',
@@ -194,7 +188,6 @@ export default {
       seal: 'Governed by the seal’s own rating, drawing of the head',
     },
     unknownSeal: 'The seal’s rating is not known: the limit may be lower.',
-    planned: 'Planned test',
     waits: 'waits for {what}',
     waitsHead: 'the head',
     waitsHeight: 'the target height',

@@ -1,9 +1,9 @@
 /** The limits that an operator's programme may replace. */
 export default {
-  gasFreshMin: 'Gas check stands for',
+  gasFreshMin: 'Air readings stand for',
   lelMaxPct: 'Flammable gas, highest for hot work',
   tapesAgreeIn: 'First and second tape agree within',
-  markAgreesIn: 'Mark agrees with the computed mark within',
+  markAgreesIn: 'Mark agrees with the computed one within',
   stubAboveMarkIn: 'Stub left above the mark, at least',
   takeoffAgreesIn: 'Measured takeoff agrees with the drawing within',
   cutHighIn: 'Final cut high, at most',
@@ -12,10 +12,10 @@ export default {
   greaseClearIn: 'Grease kept clear of the weld, at least',
   rotationDeg: 'Two-hole error, at most',
   tiltDeg: 'Flange tilt, at most',
-  datumWithinIn: 'Datum height within',
+  datumWithinIn: 'Datum within this of the target',
   passTemperatureMin: 'Temperature read before a pass, within',
   touchF: 'Cool enough to touch at',
   collapseSharePct: 'Test pressure, share of the casing’s collapse',
-  gaugeLowPct: 'Gauge: target at least this share of full scale',
-  gaugeHighPct: 'Gauge: target at most this share of full scale',
+  gaugeLowPct: 'Target on the gauge, from',
+  gaugeHighPct: 'Target on the gauge, up to',
 };

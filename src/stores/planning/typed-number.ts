@@ -12,7 +12,7 @@ export type TypedNumber = { is: 'blank' } | { is: 'unread'; text: Text } | { is:
 export function readTyped(typed: string, unit: Unit, system: UnitSystem): TypedNumber {
   if (typed.trim() === '') return { is: 'blank' };
   const parsed = parseQuantity(typed, unitFor(unit, system));
-  if (!parsed.ok) return { is: 'unread', text: { key: `calculations.${parsed.reason}` } };
+  if (!parsed.ok) return { is: 'unread', text: { key: `entry.${parsed.reason}` } };
   if (parsed.unit === unit) return { is: 'read', decimal: parsed.exact };
   return { is: 'read', decimal: toDecimal(convertIfAlike(parsed.value, parsed.unit, unit) ?? parsed.value) };
 }

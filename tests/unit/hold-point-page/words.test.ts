@@ -18,7 +18,7 @@ describe('the working pages', () => {
   });
 
   it.each(settingNames)('name the setting %s', (name) => {
-    expect(has(`job.settings.${name}`)).toBe(true);
+    expect(has(`settings.${name}`)).toBe(true);
   });
 
   it.each([

@@ -42,7 +42,7 @@ describe('a plan’s form', () => {
     const { planning, faults } = read({ targetHeight: '143/8' });
     expect(planning).toBeNull();
     expect(faults).toMatchObject([
-      { field: 'targetHeightIn', kind: 'unread', text: { key: 'calculations.quantity-fraction-not-proper' } },
+      { field: 'targetHeightIn', kind: 'unread', text: { key: 'entry.quantity-fraction-not-proper' } },
     ]);
   });
 

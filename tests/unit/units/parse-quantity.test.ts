@@ -2,7 +2,7 @@ import { Decimal } from 'decimal.js';
 import fc from 'fast-check';
 import { Fraction } from 'fraction.js';
 import { describe, expect, it } from 'vitest';
-import calculationMessages from '../../../shared/locales/en/calculations';
+import entryWords from '../../../shared/locales/en/entry';
 import { convert, parseQuantity, printFeetInches, printInches, type Unit } from '../../../shared/units';
 
 const read = (text: string, unit: Unit = 'in') => {
@@ -94,7 +94,7 @@ describe('what cannot be meant is refused with its own reason', () => {
     ['14 constructor', 'in', 'quantity-unit-unknown'],
   ])('"%s" in %s', (text, unit, reason) => {
     expect(read(text, unit)).toBe(reason);
-    expect(calculationMessages).toHaveProperty(reason);
+    expect(entryWords).toHaveProperty(reason);
   });
 
   it('never throws, whatever is typed', () => {
@@ -105,7 +105,7 @@ describe('what cannot be meant is refused with its own reason', () => {
         if (parsed.ok) {
           expect(Number.isFinite(parsed.value)).toBe(true);
           expect(String(Number(parsed.exact))).toBe(String(parsed.value));
-        } else expect(calculationMessages).toHaveProperty(parsed.reason);
+        } else expect(entryWords).toHaveProperty(parsed.reason);
       }),
       { numRuns: 2000 },
     );

@@ -43,7 +43,8 @@ export default {
   cautions: {
     cellar:
       'The cellar may be a permit-required confined space: bad air can kill within a breath. Water in it can drown and carries current. The site’s permit and the entry supervisor rule.',
-    permit: 'Hot work goes by the site’s permit and local codes. Headfast records the check; it does not declare the place safe.',
+    permit:
+      'Hot work goes by the site’s permit and local codes. Headfast records the check; it does not declare the place safe.',
   },
   computed: {},
 };

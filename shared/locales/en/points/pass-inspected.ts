@@ -13,7 +13,11 @@ export default {
     size: 'Measured on the pass',
   },
   fields: {
-    temps: { head: 'Temperature of the head', casing: 'Temperature of the casing', instrument: 'Pyrometer, where one was used' },
+    temps: {
+      head: 'Temperature of the head',
+      casing: 'Temperature of the casing',
+      instrument: 'Pyrometer, where one was used',
+    },
     tacked: orientationFields,
     welders: 'Welder or welders',
     rods: {
