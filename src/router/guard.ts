@@ -10,6 +10,7 @@ export async function guard(to: RouteLocationNormalized): Promise<true | RouteLo
   await session.known();
   const actor = session.actor;
   if (to.name === 'sign-in') return actor === undefined ? true : await firstPage();
+  if (to.name === 'start') return actor === undefined ? { name: 'sign-in' } : await firstPage();
   if (to.meta.public === true) return true;
   if (actor === undefined) {
     return to.fullPath === '/jobs' ? { name: 'sign-in' } : { name: 'sign-in', query: { to: to.fullPath } };

@@ -14,7 +14,13 @@ declare module 'vue-router' {
 
 /** Every screen by its address. Each view is loaded when it is first gone to. */
 export const routes: RouteRecordRaw[] = [
-  { path: '/', name: 'start', redirect: '/jobs' },
+  // the guard sends everybody on to where the own work waits
+  {
+    path: '/',
+    name: 'start',
+    component: () => import('../views/JobsView.vue'),
+    meta: { public: true, title: 'app.go.jobs' },
+  },
   {
     path: '/sign-in',
     name: 'sign-in',
