@@ -64,6 +64,7 @@ export default {
     digits: { one: '1 digit typed', other: '{count} digits typed' },
     rubOut: 'Rub out the last digit',
     short: 'A signing PIN has six digits or more.',
+    reasonFirst: 'First what is asked for above; the signature is bound to it.',
     confirm: 'Sign',
   },
   problem: {

@@ -8,6 +8,8 @@ export default {
   empty: 'Nothing waits for you.',
   emptyWhy:
     'A hold point appears here when the welder presents it. What is under way stands under Jobs, what is sealed under Packets.',
+  emptyPusher:
+    'Valve orientation appears here when the welder presents it. Before the head is lifted, name the valve’s direction on the job’s own page.',
   toJobs: 'Look at the jobs',
   toPackets: 'Look at the packets',
   at: '{well}, {rig}',
