@@ -8,6 +8,7 @@ import { doneBefore } from './done-before';
 import { check, quantity } from './fields';
 import { byProcedure, commonPractice, judgeCheck, judgeRange, standard } from './judging';
 import type { Verdict } from './verdict';
+import { act } from './order';
 
 /** How far below the head's base the casing is cleaned, and how far down its inside. Common practice. */
 const cleanBelowBaseIn = 3;
@@ -117,6 +118,7 @@ const roundness = (context: PointContext, place: 'seal' | 'weld') => {
 export const bevelPrep: PointDefinition = {
   kind: 'bevel-prep',
   version: 1,
+  order: [act('bevel')],
   groups: (context) => {
     const { bevelDeg } = context.state.plan.procedure;
     const outside = cleanOutsideIn(context);

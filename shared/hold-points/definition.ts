@@ -1,6 +1,7 @@
 import type { InstrumentKind } from '../job/plan';
 import type { Unit } from '../units/units';
 import type { PointContext } from './context';
+import type { Part } from './order';
 import type { PointKind } from './points';
 import type { Computed, Verdict } from './verdict';
 
@@ -64,6 +65,8 @@ export interface ActDefinition {
 export interface PointDefinition {
   kind: PointKind;
   version: number;
+  /** the order of the work where it matters; what it leaves out comes after it */
+  order?: readonly Part[];
   groups(context: PointContext): GroupDefinition[];
   shots(context: PointContext): ShotDefinition[];
   acts(context: PointContext): ActDefinition[];

@@ -16,6 +16,7 @@ import { leftToCutIn } from './stub';
 import { stringHeightOf, takeoffOf } from './takeoff-of';
 import { judgeUsable } from './unusable';
 import type { Verdict } from './verdict';
+import { act, read, shot } from './order';
 
 /** How far below the lowest weld the fluid in the casing has to stand, so that it neither chills nor boils. Common practice. */
 export const fluidBelowWeldIn = 24;
@@ -112,6 +113,7 @@ const judgeBeforeCut = (context: PointContext): Verdict[] => {
 export const finalCut: PointDefinition = {
   kind: 'final-cut',
   version: 1,
+  order: [read(/^(fluid|string)\b/), shot('wraparound-on-mark'), act('final-cut')],
   groups: (context) => {
     const mark = takeoffOf(context)?.markIn;
     return [

@@ -19,6 +19,7 @@ import { landsAt, measuredOnHead, takeoffOf } from './takeoff-of';
 import { agreedOrFarthest, judgeAgreement, twoPersonFields, twoPersons } from './two-persons';
 import { judgeUsable } from './unusable';
 import type { Verdict } from './verdict';
+import { act, read } from './order';
 
 /** Room that a welder needs under the head's base for rod, arm and eyes. Common practice. */
 export const weldRoomNeededIn = 12;
@@ -175,6 +176,14 @@ const markedElevation = (context: PointContext): number | undefined => {
 export const heightTakeoff: PointDefinition = {
   kind: 'height-takeoff',
   version: 1,
+  // the conductor hides the casing; where the mark falls is known before the stub is shortened
+  order: [
+    read(/^(nameplate|tape|takeoff|socket)\b/),
+    read(/^string\b/),
+    act('conductor-cut'),
+    read(/^mark\b/),
+    act('rough-cut'),
+  ],
   groups,
   shots: () => ['nameplate', 'tape-on-head', 'tape-at-string'].map((key) => ({ key, required: true })),
   // Conductor and stub may stand rough cut already when the welder arrives; what stands is measured either way.

@@ -19,6 +19,7 @@ import { judgeRods, rodGroup } from './rods';
 import { judgeUsable } from './unusable';
 import type { Computed, Verdict } from './verdict';
 import { beadsSoFar, planLegIn, weldMetal } from './weld-metal';
+import { act, read } from './order';
 
 /** The first pass of the first go starts with the tacks, and they may pull the head. */
 const startsWithTacks = ({ point }: PointContext): boolean => point.place.round === 0 && point.place.pass === 1;
@@ -142,6 +143,7 @@ const compute = (context: PointContext): Computed[] => {
 export const passInspected: PointDefinition = {
   kind: 'pass-inspected',
   version: 1,
+  order: [act('tacks'), read(/^tacked\b/), read(/^temps\b/), act('pass')],
   groups,
   shots: () => ['pass-side-a', 'pass-side-b'].map((key) => ({ key, required: true })),
   acts,

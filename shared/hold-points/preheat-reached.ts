@@ -10,6 +10,7 @@ import { byDrawing, byProcedure, commonPractice, judgeCheck, judgeFact, judgeRan
 import { doneBefore } from './done-before';
 import { judgePlugsOut } from './plug-in-port';
 import type { Computed, Verdict } from './verdict';
+import { act, read } from './order';
 
 const isRepair = (context: PointContext): boolean => context.point.place.round > 0;
 const metalFields = ['head', 'casing'].flatMap((part) => quarters.map((quarter) => `preheat.${part}.${quarter}`));
@@ -156,6 +157,7 @@ const compute = (context: PointContext): Computed[] => {
 export const preheatReached: PointDefinition = {
   kind: 'preheat-reached',
   version: 1,
+  order: [act('excavation'), read(/^excavated/), act('preheat')],
   groups,
   shots: () => [{ key: 'instrument-on-metal', required: true }],
   acts: (context) => [

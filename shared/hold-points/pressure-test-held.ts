@@ -13,6 +13,7 @@ import { pressureLimitsOf } from './pressure-limits';
 import { portsOf } from './ports';
 import { gaugeFullScalePsi, judgeBeforeTest, judgeTest, reachedCollapse } from './test-limits';
 import type { Computed } from './verdict';
+import { act, read } from './order';
 
 /** A usual hydraulic oil: bulk modulus in psi, expansion per °F. Common practice; the oil's own sheet governs. */
 const oil = { bulkModulusPsi: 300_000, expansionPerF: 0.00046 } as const;
@@ -102,6 +103,7 @@ const compute = (context: PointContext): Computed[] => {
 export const pressureTestHeld: PointDefinition = {
   kind: 'pressure-test-held',
   version: 1,
+  order: [read(/^(port-probed|fitting-in|exclusion|gauge|full-scale|volume)$/), act('pressure-test')],
   groups,
   shots: () => ['gauge-start', 'gauge-end'].map((key) => ({ key, required: true })),
   acts: () => [{ key: 'pressure-test', flame: false, required: true }],

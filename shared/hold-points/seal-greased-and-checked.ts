@@ -5,6 +5,7 @@ import { check, choice, quantity, words } from './fields';
 import { bySetting, commonPractice, judgeCheck, judgeFact, judgeRange } from './judging';
 import { namedDirection } from './named-direction';
 import type { Verdict } from './verdict';
+import { act, read, shot } from './order';
 
 const hasSeal = (context: PointContext): boolean => context.state.plan.head.seals > 0;
 
@@ -111,6 +112,11 @@ const judgeBeforeLift = (context: PointContext): Verdict[] => {
 export const sealGreasedAndChecked: PointDefinition = {
   kind: 'seal-greased-and-checked',
   version: 1,
+  order: [
+    read(/^(direction|seal\.(part|condition|sound)|grease)/),
+    shot('seal-before'),
+    act('set-head'),
+  ],
   groups: (context) => [
     { key: 'direction', fields: [check('direction-marked')] },
     ...(hasSeal(context) ? sealGroups(context) : []),

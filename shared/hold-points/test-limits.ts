@@ -176,10 +176,20 @@ const mustBeDone = (context: PointContext, field: string, says = field): Verdict
     holds: context.value(field) === 'yes',
   });
 
+/** How far everybody stands off follows from the volume: without one nobody knows where the distance ends. */
+const judgeDistanceKnown = (context: PointContext): Verdict[] =>
+  judgeFact(context, {
+    limit: 'volume-before-nitrogen',
+    kind: 'stop',
+    about: ['volume'],
+    source: standard('ASME PCC-2 article 501'),
+    holds: (context.number('volume') ?? 0) > 0,
+  });
+
 /** Before anybody picks up a pump: a pressure that the metal bears, the port clear, the fitting in, nobody near. */
 export const judgeBeforeTest = (context: PointContext): Verdict[] => [
   ...judgeTarget(context),
   ...mustBeDone(context, 'port-probed'),
   ...mustBeDone(context, 'fitting-in'),
-  ...(isNitrogen(context) ? mustBeDone(context, 'exclusion', 'exclusion-nitrogen') : []),
+  ...(isNitrogen(context) ? [...judgeDistanceKnown(context), ...mustBeDone(context, 'exclusion', 'exclusion-nitrogen')] : []),
 ];

@@ -42,13 +42,12 @@ const entryOf = (state: JobState, field: FieldDefinition, typed: string): Record
 /**
  * Readings within every limit for all that a point asks for now, as they would be typed at `at` (ISO). Pure: the demo,
  * the tests and the walks through the browser record the same job.
- * @param only narrows to fields whose key it matches
  */
-export function goodReadings(state: JobState, point: PointState, at: string, only = /./): RecordEntry[] {
+export function goodReadings(state: JobState, point: PointState, at: string): RecordEntry[] {
   const context = contextOf(state, point);
   const known = answers[point.place.kind](context, at);
   return reviewPoint(state, point)
-    .fields.filter((field) => field.required && only.test(field.key))
+    .fields.filter((field) => field.required)
     .flatMap((field) => {
       const typed = known[field.key];
       return typed === undefined ? [] : [entryOf(state, field, typed)];

@@ -1,5 +1,6 @@
 import type { Verdict } from '../../../shared/hold-points/verdict';
-import type { PlacedField, PointReview } from '../../../shared/job/review';
+import { dueAt, type Due } from '../../../shared/job/due';
+import type { PointReview } from '../../../shared/job/review';
 import type { PointState } from '../../../shared/job/state';
 
 /** The one thing that the main button does now. */
@@ -24,18 +25,9 @@ type JudgeBegin = (act: string) => readonly Verdict[];
 
 const isStop = (verdict: Verdict): boolean => verdict.outcome === 'outside' && verdict.kind === 'stop';
 
-const missingFields = (review: PointReview): PlacedField[] =>
-  review.fields.filter((field) => review.missing.includes(`field:${field.key}`));
-
-const missingAct = (review: PointReview, point: PointState): string | undefined =>
-  review.acts.find((act) => act.required && !point.acts.some((run) => run.act === act.key))?.key;
-
-/** What is read or photographed next: fields in their order, then shots. */
-const evidenceStep = (review: PointReview): Step | null => {
-  const field = missingFields(review)[0];
-  if (field) return { kind: 'field', field: field.key };
-  const shot = review.missing.find((key) => key.startsWith('shot:'));
-  return shot === undefined ? null : { kind: 'shot', shot: shot.slice('shot:'.length) };
+const evidenceStep = (due: Due | undefined): Step | null => {
+  if (due?.due === 'fields') return { kind: 'field', field: due.fields[0]?.key ?? '' };
+  return due?.due === 'shot' ? { kind: 'shot', shot: due.shot } : null;
 };
 
 /** The field of this point that such a verdict waits for: one that is not there yet, else the oldest reading. */
@@ -52,27 +44,38 @@ const siteThatHolds = (verdicts: readonly Verdict[]): 'air' | 'permit' | undefin
   return about.some((key) => key.startsWith('permit.')) ? 'permit' : undefined;
 };
 
+/** Work whose turn has come begins; what stands in its way and can be put right here comes before it. */
+const toBegin = (review: PointReview, act: string, judgeBegin: JudgeBegin): Step => {
+  const stops = judgeBegin(act).filter(isStop);
+  if (stops.length === 0) return { kind: 'begin-act', act };
+  const field = fieldThatHolds(review, stops);
+  if (field !== undefined) return { kind: 'field', field };
+  const what = siteThatHolds(stops);
+  return what === undefined ? { kind: 'blocked' } : { kind: 'site', what };
+};
+
 /**
- * What comes next at an open point. Work that runs is ended first; work that must be done begins as soon as nothing
- * stands in its way; then readings and photos; complete, it is presented, or measured again while that can help.
+ * What comes next at an open point, in the order of its definition. Work that runs is ended first; work that may be
+ * passed over is offered beside what comes after it; complete, the point is presented, or measured again while that
+ * can help.
  */
 export const nextSteps = (review: PointReview, point: PointState, judgeBegin: JudgeBegin): Steps => {
-  const evidence = evidenceStep(review);
+  const dues = dueAt(review, point);
   const running = point.acts.find((run) => run.ended === null);
-  if (running) return { main: { kind: 'end-act', act: running.act }, other: evidence };
-  const act = missingAct(review, point);
-  if (act !== undefined) {
-    const stops = judgeBegin(act).filter(isStop);
-    if (stops.length === 0) return { main: { kind: 'begin-act', act }, other: evidence };
-    // What stands in the way and can be read here comes before everything else.
-    const key = fieldThatHolds(review, stops);
-    if (key !== undefined) return { main: { kind: 'field', field: key }, other: null };
-    const what = siteThatHolds(stops);
-    if (what !== undefined) return { main: { kind: 'site', what }, other: evidence };
+  if (running) {
+    const evidence = dues.find((one) => one.due === 'fields' || one.due === 'shot');
+    return { main: { kind: 'end-act', act: running.act }, other: evidenceStep(evidence) };
   }
-  if (evidence) return { main: evidence, other: null };
-  if (act !== undefined) return { main: { kind: 'blocked' }, other: null };
-  return finished(review);
+  const at = dues.findIndex((one) => one.due !== 'optional-act');
+  const due = dues[at];
+  if (!due) return finished(review);
+  if (due.due === 'act') return { main: toBegin(review, due.act, judgeBegin), other: null };
+  const before = dues[at - 1];
+  const optional = before?.due === 'optional-act' ? toBegin(review, before.act, judgeBegin) : null;
+  return {
+    main: evidenceStep(due) ?? { kind: 'blocked' },
+    other: optional?.kind === 'begin-act' || optional?.kind === 'site' ? optional : null,
+  };
 };
 
 const finished = (review: PointReview): Steps => {
@@ -84,9 +87,17 @@ const finished = (review: PointReview): Steps => {
   return { main: { kind: 'measure-again', field: again }, other: present };
 };
 
-/** The field that the entry goes on to after one was recorded; undefined when something else comes next. */
-export const fieldAfter = (review: PointReview, key: string): string | undefined => {
+/**
+ * The field that the entry goes on to after one was recorded: the next that is missing up to the next photo or work,
+ * then those passed over before it; undefined when the main button has something else to say.
+ */
+export const fieldAfter = (review: PointReview, point: PointState, key: string): string | undefined => {
+  const dues = dueAt(review, point).filter((one) => one.due !== 'optional-act');
+  const end = dues.findIndex((one) => one.due !== 'fields');
+  const open = dues
+    .slice(0, end < 0 ? undefined : end)
+    .flatMap((one) => (one.due === 'fields' ? one.fields : []))
+    .filter((field) => field.key !== key);
   const at = review.fields.findIndex((field) => field.key === key);
-  const open = missingFields(review).filter((field) => field.key !== key);
   return (open.find((field) => review.fields.indexOf(field) > at) ?? open[0])?.key;
 };

@@ -132,6 +132,14 @@ describe('before pressure', () => {
     expect(before(field, { [field]: 'yes' })).toBe('stop within');
   });
 
+  it('wants the volume before nitrogen goes in, for the distance follows from it', () => {
+    const nitrogen = planOf({ medium: 'nitrogen' });
+    expect(before('volume-before-nitrogen', {}, nitrogen)).toBe('stop outside');
+    expect(before('volume-before-nitrogen', { volume: 0 }, nitrogen)).toBe('stop outside');
+    expect(before('volume-before-nitrogen', { volume: 120 }, nitrogen)).toBe('stop within');
+    expect(before('volume-before-nitrogen', {})).toBeUndefined();
+  });
+
   it('wants an exclusion zone for nitrogen; with oil it only advises one', () => {
     const nitrogen = planOf({ medium: 'nitrogen' });
     expect(before('exclusion', {}, nitrogen)).toBe('stop outside');

@@ -94,6 +94,10 @@ export default {
     outside:
       'The plug of port {port} was lost and another one put in. Show that thread and rating are the same; the company representative decides.',
   },
+  'volume-before-nitrogen': {
+    within: 'The volume is there, and with it the distance to stand off.',
+    outside: 'The volume with hoses is not there, so nobody knows how far to stand off. Enter it before nitrogen goes in.',
+  },
   'exclusion-nitrogen': {
     within: 'The exclusion zone is set.',
     outside: 'No exclusion zone is recorded. No nitrogen before everybody is out of the distance and it is kept clear.',
