@@ -156,7 +156,7 @@ export const judgeFlame = (context: PointContext, at: string): Verdict[] => {
       kind: 'stop',
       about: ['permit.expires'],
       source: commonPractice,
-      params: expires === undefined ? { expires: '' } : { expires: { instant: expires } },
+      ...(expires === undefined ? { says: 'permit-missing' } : { params: { expires: { instant: expires } } }),
       holds: expires !== undefined && Date.parse(expires) > Date.parse(at),
     }),
   ];

@@ -31,7 +31,7 @@ export const hotWorkClearance: PointDefinition = {
         kind: 'stop',
         about: ['permit.expires'],
         source: commonPractice,
-        params: { expires: expires ? { instant: expires.value } : '' },
+        ...(expires && { params: { expires: { instant: expires.value } } }),
         holds: expires ? Date.parse(expires.value) > Date.parse(expires.at.corrected) : undefined,
       }),
     ];

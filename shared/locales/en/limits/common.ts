@@ -50,6 +50,10 @@ export default {
     within: 'The permit is in force until {expires}.',
     outside: 'The hot work permit is not in force (it ran to {expires}). Have it renewed and enter the new expiry.',
   },
+  'permit-missing': {
+    within: 'A hot work permit is entered.',
+    outside: 'No hot work permit is entered. Enter its number, issuer and expiry before lighting anything.',
+  },
   'clock-doubt': {
     within: 'The times of these readings are sure.',
     outside:
