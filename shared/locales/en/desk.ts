@@ -30,6 +30,8 @@ export default {
   stoppedNote: 'Work is stopped by {name}, {at}: {reason}. Nothing is released before it is resumed.',
   photo: '{name}. {hash}',
   noPhotos: 'This hold point asks for no photo.',
+  readings: 'Readings against their limits',
+  reading: 'Reading',
   value: 'Value',
   limit: 'Limit and source',
   verdict: 'Verdict',
