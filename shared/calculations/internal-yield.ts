@@ -1,5 +1,5 @@
-import { firstRefusal, mustBe, refuse, type Outcome } from './outcome';
-import { DIAMETER_IN, YIELD_PSI } from './ranges';
+import { refuseCasingBody, type CasingBody } from './casing-body';
+import type { Outcome } from './outcome';
 
 export const internalYieldInfo = {
   id: 'internal-yield',
@@ -10,19 +10,10 @@ export const internalYieldInfo = {
 } as const;
 
 /** Inside pressure at which the casing's wall yields, psi to the nearest 10. */
-export const internalYield = (casing: {
-  odIn: number;
-  wallIn: number;
-  yieldPsi: number;
-}): Outcome<{ internalYieldPsi: number; unroundedPsi: number }> => {
-  const { odIn, wallIn, yieldPsi } = casing;
-  const refused = firstRefusal(
-    mustBe('odIn', odIn, DIAMETER_IN),
-    mustBe('wallIn', wallIn, { atLeast: 0.01, atMost: 10 }),
-    mustBe('yieldPsi', yieldPsi, YIELD_PSI),
-  );
+export const internalYield = (casing: CasingBody): Outcome<{ internalYieldPsi: number; unroundedPsi: number }> => {
+  const refused = refuseCasingBody(casing);
   if (refused) return refused;
-  if (2 * wallIn >= odIn) return refuse('wall-too-thick', 'wallIn', { atLeast: 0.01, below: odIn / 2 });
+  const { odIn, wallIn, yieldPsi } = casing;
   const unroundedPsi = (0.875 * 2 * yieldPsi * wallIn) / odIn;
   return { ok: true, internalYieldPsi: Math.round(unroundedPsi / 10) * 10, unroundedPsi };
 };
