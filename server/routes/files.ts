@@ -2,16 +2,15 @@ import { Router } from 'express';
 import type { Request } from 'express';
 import { getFile, putFile } from '../../shared/contracts/files';
 import type { FileRefusal } from '../../shared/photos/refusals';
-import { sendFile } from '../middleware/file-answer';
 import { bytesOfBody, drainBody, kindOfBody, lengthOfBody } from '../middleware/file-body';
 import { Problem } from '../middleware/problem';
 import type { AppDeps } from '../services/deps';
-import { findJobFile } from '../services/find-job-file';
 import { findJobScope } from '../services/find-job-scope';
 import { jobFileRegister } from '../services/register-job-file';
 import { storeFile } from '../services/store-file';
 import { takeUpload } from '../services/take-upload';
 import { makeStorage } from '../storage/make-storage';
+import { answerFile } from './answer-file';
 import { mount } from './mount';
 
 const statusOf = (code: FileRefusal): number =>
@@ -43,19 +42,7 @@ export function fileRoutes(deps: AppDeps): Router {
     { job },
   );
 
-  mount(
-    router,
-    getFile,
-    async ({ params, req, res }) => {
-      const file = await findJobFile(deps.dataSource, params.id, params.sha256);
-      if (!file) throw new Problem(404, 'permission.not-found');
-      const stored = await storage.open({ jobId: params.id, sha256: file.sha256 });
-      if (!stored) throw new Error('a file of the record is not in the storage');
-      await sendFile(req, res, file, stored);
-      return undefined;
-    },
-    { job },
-  );
+  mount(router, getFile, (asked) => answerFile(deps, storage, asked), { job });
 
   return router;
 }

@@ -1,14 +1,13 @@
 import { Router } from 'express';
 import * as contract from '../../shared/contracts/packets';
-import { sendFile } from '../middleware/file-answer';
 import { Problem } from '../middleware/problem';
 import type { AppDeps } from '../services/deps';
-import { findJobFile } from '../services/find-job-file';
 import { findPacketScope } from '../services/find-job-scope';
 import { listPackets } from '../services/list-packets';
 import { readJobEvents } from '../services/read-job';
 import { readPacket } from '../services/read-packet';
 import { makeStorage } from '../storage/make-storage';
+import { answerFile } from './answer-file';
 import { mount } from './mount';
 
 /** Sealed and called-off jobs, for those who may read them. */
@@ -30,18 +29,7 @@ export function packetRoutes(deps: AppDeps): Router {
     { job },
   );
 
-  mount(
-    router,
-    contract.getPacketFile,
-    async ({ params, req, res }) => {
-      const file = found(await findJobFile(deps.dataSource, params.id, params.sha256));
-      const stored = await storage.open({ jobId: params.id, sha256: file.sha256 });
-      if (!stored) throw new Error('a file of the record is not in the storage');
-      await sendFile(req, res, file, stored);
-      return undefined;
-    },
-    { job },
-  );
+  mount(router, contract.getPacketFile, (asked) => answerFile(deps, storage, asked), { job });
 
   return router;
 }
