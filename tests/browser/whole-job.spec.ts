@@ -68,7 +68,7 @@ test('four people carry a job from planned to sealed, and an auditor believes it
 
   await test.step('the tool pusher names the direction before the head is lifted', async () => {
     await pusher.page.goto(`/jobs/${jobId}`);
-    await tap(pusher.page.getByRole('button', { name: 'Name the direction' }));
+    await tap(pusher.page.getByRole('button', { name: 'Name the direction' }).first());
     await pusher.page.getByRole('dialog').getByRole('radio', { name: 'mud tanks' }).check();
     await tap(pusher.page.getByRole('dialog').getByRole('button', { name: 'Name the direction' }));
     await expect(pusher.page.getByText(/mud tanks, named by T\. Rhule/)).toBeVisible();
@@ -134,7 +134,7 @@ test('four people carry a job from planned to sealed, and an auditor believes it
 
   await test.step('the job is sealed with its concessions read back', async () => {
     await rep.page.goto(`/jobs/${jobId}`);
-    await tap(rep.page.getByRole('button', { name: 'Seal the job' }));
+    await tap(rep.page.getByRole('button', { name: 'Seal the job' }).first());
     await expect(rep.page.getByRole('dialog').getByText('The packet carries 1 concession.')).toBeVisible();
     await signWithPin(rep.page, rep.pin, 'Seal the job');
     await expect(rep.page.getByText(/Sealed by O\. Brandt/)).toBeVisible();
