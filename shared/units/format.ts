@@ -64,12 +64,12 @@ export const quantityParts = (
   if (!numeric.test(quantity)) return { value: quantity, unit: symbolOf(unit) };
   const shown = unitFor(unit, system);
   const number = Number(quantity);
-  if (shown === unit) return printAmount(toDecimal(number), shown);
+  if (shown === unit) return printAmount(toDecimal(number), shown, { difference });
   const turned = difference
     ? convertDifference(number, unit, shown as UnitLike<Unit>)
     : (convertIfAlike(number, unit, shown) ?? number);
   // a converted number has decimals that nobody read
-  return printAmount(toDecimal(turned), shown, true);
+  return printAmount(toDecimal(turned), shown, { converted: true, difference });
 };
 
 /** The same in one piece: `14 3/8 in`, `310 °F`, `0.15°`. */

@@ -40,8 +40,16 @@ const others: Places = { typed: 2, worked: 2 };
 /** What comes in any size, from a thimble to a tank: three figures tell enough. */
 const threeFigures: ReadonlySet<Unit> = new Set<Unit>(['L', 'gal', 'in3', 'lb', 'kg', 'J', 'kJ', 'ftLbf']);
 
-/** Decimals below which a number is only what arithmetic leaves behind. */
-const finest = 6;
+/** What is known of a number beside its digits. */
+export interface Origin {
+  /** it was kept in another unit: none of its decimals was read by anybody */
+  readonly converted?: boolean;
+  /** it tells by how much two values differ, or a limit is missed */
+  readonly difference?: boolean;
+}
+
+/** Decimals below which a number is only what arithmetic leaves behind; a difference may be as small as it is kept. */
+const finest = ({ difference }: Origin): number => (difference ? 6 : 4);
 
 const decimalsOf = (decimal: string): number => decimal.split('.')[1]?.length ?? 0;
 
@@ -51,17 +59,18 @@ const workedPlaces = (size: number, unit: Unit): number =>
     : (places[unit] ?? others).worked;
 
 /** Rounded, but never to nothing: a limit that is missed by a little is still missed by something. */
-const rounded = (value: number, decimals: number): string => {
+const rounded = (value: number, decimals: number, origin: Origin): string => {
   let text = toDecimal(value, decimals);
-  for (let more = decimals + 1; Number(text) === 0 && more <= finest; more++) text = toDecimal(value, more);
+  for (let more = decimals + 1; Number(text) === 0 && more <= finest(origin); more++) text = toDecimal(value, more);
   return text;
 };
 
-const printNumber = (decimal: string, unit: Unit, converted: boolean): string => {
+const printNumber = (decimal: string, unit: Unit, origin: Origin): string => {
   const value = Number(decimal);
   const { typed } = places[unit] ?? others;
-  const asTyped = !converted && decimalsOf(decimal) <= typed && !(threeFigures.has(unit) && decimalsOf(decimal) > 2);
-  return asTyped ? decimal : rounded(value, workedPlaces(Math.abs(value), unit));
+  const asTyped =
+    !origin.converted && decimalsOf(decimal) <= typed && !(threeFigures.has(unit) && decimalsOf(decimal) > 2);
+  return asTyped ? decimal : rounded(value, workedPlaces(Math.abs(value), unit), origin);
 };
 
 /** Below this, in inches, a sixty-fourth is too coarse to tell by how much something is off. */
@@ -71,30 +80,28 @@ const tooSmallForTheTape = 1 / 32;
 const caliperDecimals = 4;
 
 /** Inches as fractions wherever a tape has a mark and for lengths worked out; a caliper's thousandths stay decimals. */
-const printLength = (decimal: string): string => {
+const printLength = (decimal: string, origin: Origin): string => {
   const value = Number(decimal);
   const onTheTape = Math.abs(value * 64 - Math.round(value * 64)) < 64e-6;
   const asDecimal = decimalsOf(decimal) <= caliperDecimals || Math.abs(value) < tooSmallForTheTape;
-  return !onTheTape && asDecimal ? rounded(value, 3) : printInches(value, 64);
+  return !onTheTape && asDecimal ? rounded(value, 3, origin) : printInches(value, 64);
 };
 
 /** Past this many minutes nobody counts in minutes. */
 const longMinutes = 120;
 
-const printMinutes = (decimal: string): PrintedQuantity => {
+const printMinutes = (decimal: string, origin: Origin): PrintedQuantity => {
   const minutes = Math.round(Math.abs(Number(decimal)));
-  if (minutes <= longMinutes) return { value: printNumber(decimal, 'min', false), unit: symbolOf('min') };
+  if (minutes <= longMinutes) return { value: printNumber(decimal, 'min', origin), unit: symbolOf('min') };
   const sign = Number(decimal) < 0 ? '-' : '';
   const [hours, rest] = [Math.floor(minutes / 60), minutes % 60];
   if (rest === 0) return { value: `${sign}${hours}`, unit: symbolOf('h') };
   return { value: `${sign}${hours}\u00a0h\u00a0${rest}`, unit: symbolOf('min') };
 };
 
-/**
- * A number in the unit that it is read in. `decimal` is a canonical decimal string; `converted` says that it was kept
- * in another unit, so that none of its decimals was read by anybody.
- */
-export const printAmount = (decimal: string, unit: Unit, converted = false): PrintedQuantity => {
-  if (unit === 'min') return printMinutes(decimal);
-  return { value: unit === 'in' ? printLength(decimal) : printNumber(decimal, unit, converted), unit: symbolOf(unit) };
+/** A number in the unit that it is read in. `decimal` is a canonical decimal string. */
+export const printAmount = (decimal: string, unit: Unit, origin: Origin = {}): PrintedQuantity => {
+  if (unit === 'min') return printMinutes(decimal, origin);
+  const value = unit === 'in' ? printLength(decimal, origin) : printNumber(decimal, unit, origin);
+  return { value, unit: symbolOf(unit) };
 };

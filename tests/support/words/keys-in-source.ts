@@ -27,7 +27,7 @@ const template = new RegExp(`\`((?:${areas})\\.[^\`\\s]*\\$\\{[^\`]*)\``, 'g');
 
 /** Names that look like keys and are none: permissions, columns of a table, the browser's own store. */
 const noKey =
-  /^(job\.(command\.|read|plan|list|id|search|\$\{by\})|jobs\.id|packet\.|desk\.read|account\.(self|id)|plan\.\$\{accountId\})/;
+  /^(job\.command\.|job\.\$\{by\}|job\.(read|plan|list|id|search)\b|jobs\.id$|packet\.|desk\.read$|account\.(self|id)$|plan\.\$\{accountId\})/;
 
 const isMessageKey = (key: string): boolean => !noKey.test(key);
 
