@@ -19,7 +19,9 @@ const judgeFacing = (context: PointContext): Verdict[] => {
     kind: 'stop',
     about: ['faces'],
     source: commonPractice,
-    params: { direction: namedDirection(context) },
+    ...(context.state.direction === null
+      ? { says: 'faces-unnamed' }
+      : { params: { direction: namedDirection(context) } }),
     holds: faces === undefined ? undefined : faces === 'yes' && context.state.direction !== null,
   });
 };

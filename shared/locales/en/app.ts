@@ -29,7 +29,7 @@ export default {
     coordinator: 'coordinator',
   },
   go: {
-    where: 'Main ways',
+    where: 'Where to go',
     jobs: 'Jobs',
     desk: 'Signing desk',
     packets: 'Packets',

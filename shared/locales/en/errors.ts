@@ -27,12 +27,12 @@ export default {
     needed: 'Sign in first. What you have entered is kept.',
   },
   'sign-in': {
-    refused: 'E-mail and password do not belong together.',
+    refused: 'E-mail and password do not match. Type both again.',
     locked: 'Too many attempts. The next one is possible in {seconds} seconds.',
   },
   permission: {
     'not-found': 'There is no such thing, or it is not yours to see.',
-    forbidden: 'Your role does not do this.',
+    forbidden: 'This is not open to your role.',
   },
   signing: {
     'pin-wrong': 'That is not the right PIN, or not the right password. Nothing was signed.',
@@ -41,19 +41,19 @@ export default {
     locked: 'Too many attempts. The next one is possible in {seconds} seconds.',
   },
   password: {
-    wrong: 'That is not your password.',
+    wrong: 'That is not your password. Type it again.',
     'too-short': 'A password needs 15 characters or more.',
     'too-long': 'A password may have 200 characters at most.',
-    common: 'This password is on the list of those that are guessed first.',
+    common: 'This password is on the list of those that are guessed first. Choose another.',
     'too-simple': 'This password is a run or a repetition. Use a few words that do not belong together.',
-    'contains-you': 'This password holds a part of your name or e-mail address.',
+    'contains-you': 'This password holds a part of your name or e-mail address. Choose another.',
   },
   pin: {
-    'not-digits': 'A PIN is made of digits only.',
+    'not-digits': 'A PIN has digits only.',
     'too-short': 'A PIN needs 6 digits or more.',
     'too-long': 'A PIN may have 12 digits at most.',
-    repeats: 'This PIN repeats itself.',
-    sequence: 'This PIN is a sequence.',
+    repeats: 'This PIN repeats itself. Choose one that does not.',
+    sequence: 'This PIN is a sequence. Mix the digits.',
   },
   server: {
     failed: 'The server made a mistake. It is written down, and nothing was changed.',

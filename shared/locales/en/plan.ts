@@ -181,7 +181,7 @@ export default {
     cutWhy: 'Target, less takeoff, less stand-off. The mark follows from the string.',
     base: 'Head’s base',
     baseWhy: 'When the head sits at its shoulder',
-    safe: 'Safe test pressure',
+    safe: 'Test pressure limit',
     by: {
       flange: 'Governed by the flange’s rated working pressure, API 6A',
       collapse: 'Governed by {share} of the casing’s collapse {collapse}, API TR 5C3',

@@ -32,7 +32,7 @@ const reader = (units: UnitSystem): Formatters => ({
 const areas = Object.keys(en).join('|');
 /** A brace, a key, or a word of the machine's own on the screen; a gap where something was to stand. */
 const broken = new RegExp(
-  `[{}|]|\\b(${areas})\\.[a-z]|undefined|NaN|Infinity|null|\\d\\.\\d{5}|\\(\\s|\\s\\)| [.,;:]|  |–  `,
+  `[{}|]|\\b(${areas})\\.[a-z]|undefined|NaN|Infinity|null|\\d\\.\\d{5}|\\([\\s)]|\\s\\)| [.,;:]|  |–  `,
 );
 
 const wordsOf = (text: Text): string[] =>

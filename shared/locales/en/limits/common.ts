@@ -8,7 +8,7 @@ export default {
   'gas-flammable': {
     within: 'Flammable gas is at or below {max} of the lower explosive limit.',
     outside:
-      'Flammable gas reads {measured}, over {max} by {by}. No flame. Find and stop the source, air the place and read again.',
+      'Flammable gas reads {measured} of the lower explosive limit, over {max} by {by}. No flame. Find and stop the source, air the place and read again.',
   },
   'gas-h2s': {
     within: 'H2S is below {max}.',
@@ -71,7 +71,7 @@ export default {
   },
   'instrument-listed': {
     within: '{name} is on the job’s list.',
-    outside: '{name} is not an instrument of this job that reads this. Choose one from the job’s list.',
+    outside: '{name} is not on this job’s list for such a reading. Choose one that is.',
   },
   calibration: {
     within: '{name} is in calibration until {until}.',

@@ -64,6 +64,10 @@ export default {
     outside:
       'The valve does not face the direction that the tool pusher named ({direction}). Lift the head and set it again; turning it on the seal rolls the seal.',
   },
+  'faces-unnamed': {
+    within: 'The direction is named.',
+    outside: 'The tool pusher has named no direction, so nothing tells where the valve has to face. He names it first.',
+  },
   'seal-again': {
     within: 'The seal was looked at again and is sound.',
     outside:

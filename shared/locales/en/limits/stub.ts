@@ -72,12 +72,12 @@ export default {
       'There is {measured} under the head’s base, {by} less than the {min} a welder needs to see and reach the joint. Cut the conductor lower before the head is set.',
   },
   'lowest-cut': {
-    within: 'Cut nothing lower than {lowest} above ground: that is the planned cut and the allowance over it.',
+    within: 'Cut nothing lower than {lowest} from the ground (up is plus): the planned cut and the allowance over it.',
     outside: 'The lowest height that may be cut is not known.',
   },
   'lowest-cut-from-string': {
     within:
-      'Cut nothing lower than {fromString} from the string (up is plus), which is {lowest} above ground: the planned cut and the allowance over it.',
+      'Cut nothing lower than {fromString} from the string, which is {lowest} from the ground (up is plus): the planned cut and the allowance over it.',
     outside: 'The lowest height that may be cut is not known.',
   },
   'fluid-below-weld': {

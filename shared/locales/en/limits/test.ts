@@ -10,12 +10,13 @@ export default {
   'target-over-collapse': {
     within: 'The test pressure of {measured} is not over the casing’s collapse of {max}.',
     outside:
-      'The test pressure of {measured} is {by} over the casing’s collapse of {max}. It is not pumped: the casing would go in. The terms of the job have to change.',
+      'The test pressure of {measured} is {by} over the casing’s collapse of {max}. It is not pumped: the casing would collapse. The terms of the job have to change.',
   },
   'over-collapse-share': {
-    within: 'Test pressure and highest reading stay at {measured}, not over the {max} that the casing is let bear.',
+    within:
+      'Test pressure and highest reading stay at {measured}, not over the {max} that this job lets the casing bear.',
     outside:
-      'Test pressure or highest reading is {measured}, {by} over the {max} that the casing is let bear. Test lower if the programme lets you, or let the company representative concede it.',
+      'Test pressure or highest reading is {measured}, {by} over the {max} that this job lets the casing bear. Test lower if the programme lets you, or let the company representative concede it.',
   },
   'over-seal': {
     within: 'Test pressure and highest reading stay at {measured}, not over the seal’s {max}.',
@@ -25,7 +26,7 @@ export default {
   'highest-collapse': {
     within: 'The highest pressure of {measured} stayed below the casing’s collapse of {max}.',
     outside:
-      'The highest pressure of {measured} reached the casing’s collapse of {max}. The casing may have gone in: bleed to zero, run a gauge through the bore and record it before anything else.',
+      'The highest pressure of {measured} reached the casing’s collapse of {max}. The casing may have collapsed: bleed to zero, run a gauge through the bore and record it before anything else.',
   },
   'bore-gauged': {
     within: 'The pressure reached the casing’s collapse; a gauge has since passed through the bore.',
@@ -58,7 +59,7 @@ export default {
   'hold-covered': {
     within: 'The readings cover the hold from its start to its end.',
     outside:
-      'No reading within a minute of the start or of the end of the hold. Enter those that were taken, or hold again and read at both ends.',
+      'There is no reading within a minute of the start or of the end of the hold. Enter those that were taken, or hold again and read at both ends.',
   },
   leak: {
     within: 'No leak was seen.',
@@ -96,7 +97,8 @@ export default {
   },
   'volume-before-nitrogen': {
     within: 'The volume is there, and with it the distance to stand off.',
-    outside: 'The volume with hoses is not there, so nobody knows how far to stand off. Enter it before nitrogen goes in.',
+    outside:
+      'The volume with hoses is not there, so nobody knows how far to stand off. Enter it before nitrogen goes in.',
   },
   'exclusion-nitrogen': {
     within: 'The exclusion zone is set.',

@@ -64,7 +64,7 @@ export default {
   },
   'preheat-distance': {
     within: 'Read {measured} from the joint, at or beyond {min}.',
-    outside: 'Read {measured} from the joint; the rule asks for {min} or more. Read again further out by {by}.',
+    outside: 'Read {measured} from the joint; the rule asks for {min} or more. Read again, {by} farther out or more.',
   },
   'joint-dry': {
     within: 'The joint is dry.',
@@ -134,7 +134,7 @@ export default {
   'rods-exposure': {
     within: 'The rods were out of the oven for {measured}; {class} may be out for {max}.',
     outside:
-      'The rods were out of the oven for {measured}, {by} longer than the {max} that {class} may. Put what is left back to dry; this row needs a concession or its metal comes out.',
+      'The rods were out of the oven for {measured}, {by} longer than the {max} that {class} may be out. Put what is left back to dry; this row needs a concession or its metal comes out.',
   },
   'look-porosity': look('Porosity', 'Grind it out and weld it again, or let the company representative concede it.'),
   'look-slag': look(

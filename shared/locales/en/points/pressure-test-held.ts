@@ -13,7 +13,7 @@ export default {
     hold: 'The hold',
     'hold-readings': 'Readings during the hold',
     outcome: 'What came of it',
-    'put-back': 'Made safe again',
+    'put-back': 'Bled and put back',
   },
   fields: {
     'port-probed': 'Port probed and clear',
@@ -50,9 +50,9 @@ export default {
       'The operator’s written test procedure and local codes rule, and a licensed engineer where the casing’s rating was reached. Headfast computes; it does not declare the head fit for service.',
   },
   computed: {
-    'safe-limit-flange': 'Highest safe test pressure, set by the flange’s rating',
-    'safe-limit-collapse': 'Highest safe test pressure, set by the casing’s collapse',
-    'safe-limit-seal': 'Highest safe test pressure, set by the seal’s rating',
+    'safe-limit-flange': 'Test pressure limit, set by the flange’s rating',
+    'safe-limit-collapse': 'Test pressure limit, set by the casing’s collapse',
+    'safe-limit-seal': 'Test pressure limit, set by the seal’s rating',
     lowest: 'Lowest pressure during the hold',
     drop: 'Drop during the hold',
     rate: 'Lost per minute',
