@@ -1,169 +1,15 @@
 import { describe, expect, it } from 'vitest';
 import { concessionTotal } from '../../../shared/job/decide-failure';
-import { decide } from '../../../shared/job/decide';
-import { evolve } from '../../../shared/job/evolve';
 import { planFaults } from '../../../shared/job/plan-faults';
 import { reviewPoint } from '../../../shared/job/review';
-import { aPlan, coordinator, companyRep, helper, welder } from '../../support/a-plan';
 import { aJob, type TestJob } from '../../support/a-job';
-import { hash } from '../../support/a-job';
-import { cleanAir } from '../../support/clearance';
+import { aPlan, companyRep, coordinator, helper, welder } from '../../support/a-plan';
 import { presentPoint, recordPoint, releasePoint, walkPoint, walkTo } from '../../support/drive';
-
-const reason = 'Because it was so on site.';
-const at = (until: string, plan = aPlan()): TestJob => {
-  const job = aJob(plan);
-  walkTo(job, until);
-  return job;
-};
-const rep = (job: TestJob) => job.person('company_rep');
-const hand = (job: TestJob) => job.person('welder');
-const entry = (field: string, typed: string, unit: string | null = null) => ({ field, typed, unit, measuredBy: null });
-const reopen = (job: TestJob, point: string) => ({ point, reason, ...job.signing(point) });
-const freshAir = (job: TestJob): TestJob =>
-  job.do('record', { point: 'site', entries: [...cleanAir(), entry('gas.bump-tested', 'yes')] }, hand(job));
-/** The stops that a refusal lists; none when it was accepted. */
-const blockers = (decision: ReturnType<TestJob['try']>): string[] =>
-  decision.ok ? [] : decision.refusal.blockers.map((verdict) => verdict.limit);
-
-describe('while an act runs', () => {
-  const burning = (): TestJob => {
-    const job = freshAir(at('bevel-prep'));
-    return job.do('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job));
-  };
-
-  it('the same act is not begun again and its point is not presented', () => {
-    const job = burning();
-    expect(job.refused('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job))).toBe('act-running');
-    expect(reviewPoint(job.job, job.point('bevel-prep')).missing).toContain('act-end:bevel');
-    expect(job.refused('present', { point: 'bevel-prep', ...job.signing('bevel-prep') }, hand(job))).toBe(
-      'not-complete',
-    );
-  });
-
-  it('no earlier point is reopened under the flame', () => {
-    const job = burning();
-    expect(job.refused('reopen', reopen(job, 'final-cut'), rep(job))).toBe('act-running');
-    job.do('end-act', { point: 'bevel-prep', act: 'bevel' }, hand(job));
-    job.do('reopen', reopen(job, 'final-cut'), rep(job));
-    expect(job.point('bevel-prep').superseded).toHaveLength(1);
-  });
-
-  it('the head is not set again', () => {
-    const job = freshAir(at('preheat-reached'));
-    job.do('begin-act', { point: 'preheat-reached', act: 'preheat' }, hand(job));
-    const again = { reason, head: job.job.plan.head, targetHeightIn: '5', ...job.signingJob() };
-    expect(job.refused('set-again', again, rep(job))).toBe('act-running');
-  });
-
-  it('work may be stopped and the act ended, yet nothing is begun', () => {
-    const job = burning();
-    job.do('stop-work', { reason }, job.person('tool_pusher'));
-    job.do('end-act', { point: 'bevel-prep', act: 'bevel' }, hand(job));
-    expect(job.refused('begin-act', { point: 'bevel-prep', act: 'bevel' }, hand(job))).toBe('work-stopped');
-  });
-});
-
-describe('before fire is lit', () => {
-  const light = (job: TestJob, minutes = 0, doubtMs: number | null = 200) => {
-    const time = new Date(job.now + minutes * 60_000).toISOString();
-    const times = { device: time, corrected: time, received: new Date(job.now).toISOString(), doubtMs };
-    return decide(job.job, job.command('begin-act', { point: 'final-cut', act: 'final-cut' }), hand(job), times, hash);
-  };
-
-  it('the clock is sure', () => {
-    const job = freshAir(at('final-cut'));
-    expect(blockers(light(job, 0, null))).toEqual(['act-clock']);
-    expect(blockers(light(job, 0, 120_001))).toEqual(['act-clock']);
-    expect(light(job, 0, 120_000).ok).toBe(true);
-  });
-
-  it('air that was read after the flame began does not count', () => {
-    const job = at('final-cut');
-    job.minutes(90);
-    freshAir(job);
-    expect(light(job, -60).ok).toBe(true);
-    expect(blockers(light(job, -20))).toContain('gas-fresh');
-    expect(light(job, 1).ok).toBe(true);
-  });
-
-  it('a site reading whose clock is in doubt stops it, also after point 1 was released', () => {
-    const job = freshAir(at('final-cut'));
-    const time = new Date(job.now).toISOString();
-    const times = { device: time, corrected: time, received: time, doubtMs: null };
-    const command = job.command('record', { point: 'site', entries: [entry('gas.cellar.oxygen', '20.9', 'pct')] });
-    const decision = decide(job.job, command, hand(job), times, hash);
-    if (!decision.ok) throw new Error(decision.refusal.code);
-    decision.events.forEach((event) => (job.state = evolve(job.id, job.state, event)));
-    expect(blockers(light(job))).toContain('gas-clock');
-  });
-
-  it.each([
-    ['a meter out of calibration', 'meter-old', 'calibration.gas.meter'],
-    ['a meter that is no gas meter', 'pyrometer-1', 'listed.gas.meter'],
-    ['a meter that nobody knows', 'my own', 'listed.gas.meter'],
-  ])('%s stops it', (_name, meter, limit) => {
-    const plan = aPlan();
-    const old = { ...plan.instruments[0]!, id: 'meter-old', calibratedUntil: '2026-09-13' };
-    const job = freshAir(at('final-cut', { ...plan, instruments: [...plan.instruments, old] }));
-    job.do('record', { point: 'site', entries: [entry('gas.meter', meter)] }, hand(job));
-    expect(blockers(light(job))).toContain(limit);
-  });
-
-  it('yesterday’s bump test stops it', () => {
-    const job = at('final-cut');
-    job.minutes(24 * 60);
-    const entries = [...cleanAir(), entry('permit.expires', new Date(job.now + 3_600_000).toISOString())];
-    job.do('record', { point: 'site', entries }, hand(job));
-    expect(blockers(light(job))).toEqual(['gas.bump-tested']);
-    job.do('record', { point: 'site', entries: [entry('gas.bump-tested', 'yes')] }, hand(job));
-    expect(light(job).ok).toBe(true);
-  });
-
-  it.each(['gas.bore.flammable', 'gas.cellar.h2s', 'gas.annulus.co'])('less than nothing of %s stops it', (field) => {
-    const job = freshAir(at('final-cut'));
-    job.do(
-      'record',
-      { point: 'site', entries: [entry(field, '-1', field.endsWith('flammable') ? 'pct' : 'ppm')] },
-      hand(job),
-    );
-    expect(blockers(light(job))).toEqual([`${field}.zeroed`]);
-  });
-});
-
-describe('a plug that the test put back', () => {
-  it('keeps fire off the joint until it is out again', () => {
-    const job = at('pressure-test-held');
-    recordPoint(job, 'pressure-test-held');
-    expect(job.job.custody[0]).toMatchObject({ out: false, back: 'same' });
-    job.do('reopen', reopen(job, 'pass-4-inspected'), rep(job));
-    freshAir(job);
-    const struck = job.try('begin-act', { point: 'pass-4-inspected', act: 'pass' }, hand(job));
-    expect(blockers(struck)).toContain('plug.1.back-in');
-    job.do('reopen', reopen(job, 'test-plug-removed'), rep(job));
-    expect(job.refused('present', { point: 'test-plug-removed', ...job.signing('test-plug-removed') }, hand(job))).toBe(
-      'outside-stop',
-    );
-    job.do('record', { point: 'test-plug-removed', entries: [entry('plug.1.out', 'yes')] }, hand(job));
-    job.do('present', { point: 'test-plug-removed', ...job.signing('test-plug-removed') }, hand(job));
-    releasePoint(job, 'test-plug-removed');
-    freshAir(job);
-    expect(job.try('begin-act', { point: 'preheat-reached', act: 'preheat' }, hand(job)).ok).toBe(true);
-  });
-});
-
-describe('the root pass', () => {
-  it('is not struck before the head is tacked', () => {
-    const job = freshAir(at('pass-1-inspected'));
-    expect(blockers(job.try('begin-act', { point: 'pass-1-inspected', act: 'pass' }, hand(job)))).toContain(
-      'tacked-first',
-    );
-  });
-});
+import { blockers, entry, freshAir, hand, jobAt, reason, reopen, rep } from '../../support/job-steps';
 
 describe('a direction', () => {
   it('that is named again is marked again before the lift', () => {
-    const job = at('seal-greased-and-checked');
+    const job = jobAt('seal-greased-and-checked');
     job.do('name-direction', { direction: 'mud-tanks', words: null }, job.person('tool_pusher')).minutes(1);
     const marked = entry('direction-marked', 'yes');
     job
@@ -187,7 +33,7 @@ describe('a direction', () => {
 describe('a concession', () => {
   const lowCut = { 'cut.12': '24.1', 'cut.3': '24.1', 'cut.6': '24.1', 'cut.9': '24.1' };
   const presented = (): TestJob => {
-    const job = at('final-cut');
+    const job = jobAt('final-cut');
     const mark = Number(reviewPoint(job.job, job.point('final-cut')).computed.find((one) => one.key === 'mark')?.value);
     recordPoint(job, 'final-cut', Object.fromEntries(Object.keys(lowCut).map((key) => [key, String(mark + 0.125)])));
     presentPoint(job, 'final-cut');
@@ -249,7 +95,7 @@ describe('terms', () => {
   });
 
   it('of the air become stricter at any time and laxer only where no flame has used them', () => {
-    const job = at('bevel-prep');
+    const job = jobAt('bevel-prep');
     const fresh = (value: string) => {
       const settings = { ...job.job.plan.terms.settings, gasFreshMin: { value, source: 'job' as const } };
       return changed(job, { settings });
@@ -271,7 +117,7 @@ describe('terms', () => {
   });
 
   it('that change while a point is presented are not released unseen', () => {
-    const job = at('final-cut');
+    const job = jobAt('final-cut');
     recordPoint(job, 'final-cut');
     presentPoint(job, 'final-cut');
     const seen = job.signing('final-cut');
@@ -290,12 +136,12 @@ describe('a head that is set again', () => {
   });
 
   it('has to fit the casing and the procedure', () => {
-    const job = at('test-plug-removed');
+    const job = jobAt('test-plug-removed');
     expect(job.refused('set-again', again(job, { casingOdIn: '13.375' }), rep(job))).toBe('plan-not-workable');
   });
 
   it('leaves work stopped and the old air behind', () => {
-    const job = at('test-plug-removed');
+    const job = jobAt('test-plug-removed');
     job.do('stop-work', { reason }, hand(job));
     job.do('set-again', again(job), rep(job));
     expect(job.job.stopped).not.toBeNull();
@@ -306,7 +152,7 @@ describe('a head that is set again', () => {
   });
 
   it('takes nothing that was captured for the first setting', () => {
-    const job = at('test-plug-removed').minutes(10);
+    const job = jobAt('test-plug-removed').minutes(10);
     job.do('set-again', again(job), rep(job));
     job.minutes(-5);
     const entries = [entry('fire-watch', 'P. Lind')];
@@ -317,7 +163,7 @@ describe('a head that is set again', () => {
 
 describe('a repair round', () => {
   it('is gone when a point before it is reopened, and the next one has a new name', () => {
-    const job = at('pressure-test-held');
+    const job = jobAt('pressure-test-held');
     job.do('open-repair-round', { reason, passes: 1, ...job.signingJob() }, rep(job));
     walkPoint(job, 'test-plug-removed-r1');
     expect(job.refused('record', { point: 'pressure-test-held', entries: [entry('leak', 'none')] }, hand(job))).toBe(
@@ -338,7 +184,7 @@ describe('a repair round', () => {
 
 describe('a stop while a point is presented', () => {
   it('holds the release until work is resumed on fresh air, and on a hot joint on fresh heat and a look', () => {
-    const job = at('pass-2-inspected');
+    const job = jobAt('pass-2-inspected');
     recordPoint(job, 'pass-2-inspected');
     presentPoint(job, 'pass-2-inspected');
     job.do('stop-work', { reason }, job.person('tool_pusher'));
