@@ -138,9 +138,9 @@ describe('a photo in a row', () => {
     expect(thumb.emitted('open')).toEqual([['3'.repeat(64)]]);
   });
 
-  test('stands with words where there is no preview', () => {
+  test('stands with words where there is neither a preview nor the original', () => {
     const thumb = mount(PhotoThumb, {
-      props: { photo: aPhoto(3, { previewUrl: null }) },
+      props: { photo: aPhoto(3, { previewUrl: null, originalUrl: null }) },
       global: { plugins: [createPinia()] },
     });
     expect(thumb.text()).toContain('No preview');
