@@ -5,7 +5,7 @@ import { settingNames } from './plan';
 import { planRefused } from './plan-refused';
 import { withTrueSources } from './settings';
 import type { JobState } from './state';
-import { onlyStricter, settingUsedBy, termUsedBy } from './terms-in-use';
+import { onlyStricter, releasedBy } from './terms-in-use';
 
 /** Any time before the head is lifted; after that turning it rolls the seal. */
 export const decideNameDirection: Decider<'name-direction'> = (input) => {
@@ -28,18 +28,15 @@ const changedSettings = (a: Terms, b: Terms): SettingName[] =>
 
 /** Names of terms that a released point was judged by and that this change would move. */
 const inUse = (state: JobState, terms: Terms): string[] => {
-  const released = state.points.filter((point) => point.status === 'released').map((point) => point.place.kind);
   const old = state.plan.terms;
   const moved = [
     ...(['datum', 'targetHeightIn', 'standOffIn'] as const).filter((name) => old[name] !== terms[name]),
     ...(JSON.stringify(old.test) === JSON.stringify(terms.test) ? [] : ['test' as const]),
   ];
   return [
-    ...moved.filter((name) => termUsedBy[name].some((kind) => released.includes(kind))),
-    ...changedSettings(old, terms)
-      .filter((name) => !onlyStricter(name, old, terms))
-      .filter((name) => settingUsedBy[name].some((kind) => released.includes(kind))),
-  ];
+    ...moved,
+    ...changedSettings(old, terms).filter((name) => !onlyStricter(name, old, terms)),
+  ].filter((name) => releasedBy(state, name).length > 0);
 };
 
 /** Before point 1 is released the coordinator may still mend the plan; after that it takes the representative's signature. */

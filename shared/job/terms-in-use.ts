@@ -1,6 +1,7 @@
 import type { PointKind } from '../hold-points/points';
 import { pointKinds } from '../hold-points/points';
 import type { SettingName, Terms } from './plan';
+import type { JobState, PointState } from './state';
 
 /**
  * Which points are judged by which term. A term that a released point used is changed only after that point is reopened.
@@ -38,6 +39,16 @@ export const termUsedBy: Record<Exclude<keyof Terms, 'settings'>, readonly Point
 /** Limits of the air. They are looked at before every flame, so a stricter one is never refused: it holds from then on. */
 const ofTheAir: readonly SettingName[] = ['gasFreshMin', 'lelMaxPct'];
 
+export const isOfTheAir = (name: string): boolean => (ofTheAir as readonly string[]).includes(name);
+
 /** Whether a setting moves to the safe side in a way that no release has to be taken back for. */
 export const onlyStricter = (name: SettingName, from: Terms, to: Terms): boolean =>
-  ofTheAir.includes(name) && Number(to.settings[name].value) < Number(from.settings[name].value);
+  isOfTheAir(name) && Number(to.settings[name].value) < Number(from.settings[name].value);
+
+export type TermName = keyof typeof termUsedBy | SettingName;
+
+/** The released points that were judged by a term: while there are any, it is not changed. */
+export const releasedBy = (state: JobState, name: TermName): PointState[] => {
+  const kinds = name in termUsedBy ? termUsedBy[name as keyof typeof termUsedBy] : settingUsedBy[name as SettingName];
+  return state.points.filter((point) => point.status === 'released' && kinds.includes(point.place.kind));
+};
