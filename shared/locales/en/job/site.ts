@@ -100,11 +100,11 @@ export default {
     mend: 'A value is outside what a programme may set. Mend it first.',
     outOfRange: 'Between {min} and {max}',
     now: 'Now {value}',
-    stricterOnly: 'Released by already: only stricter',
+    stricterOnly: 'Flames were released by it: it may only become stricter',
     onlyStricter: 'A hold point was released by {now}. It may become stricter; for laxer reopen that hold point first.',
     limits: { one: '1 limit', other: '{count} limits' },
     lockedCount: { one: '1 term stays as it is', other: '{count} terms stay as they are' },
-    locked: '{title} was released by it. Reopen that hold point before it changes.',
+    locked: '{title} was released by these. Reopen that hold point before they change.',
     cannot: 'Cannot work',
   },
   failure: {
