@@ -9,6 +9,7 @@ import { cutFields, finishedCut } from './cut-readings';
 import type { PointDefinition } from './definition';
 import { doneBefore } from './done-before';
 import { byQuarter, check, quantity } from './fields';
+import { judgeFluidBelowWeld } from './fluid-in-casing';
 import { bySetting, commonPractice, judgeCheck, judgeFact, judgeRange } from './judging';
 import { restingOn } from './resting-on';
 import { judgeStringHeight, stringAgainGroup } from './string-line';
@@ -17,9 +18,6 @@ import { stringHeightOf, takeoffOf } from './takeoff-of';
 import { judgeUsable } from './unusable';
 import type { Verdict } from './verdict';
 import { act, read, shot } from './order';
-
-/** How far below the lowest weld the fluid in the casing has to stand, so that it neither chills nor boils. Common practice. */
-export const fluidBelowWeldIn = 24;
 
 /** High can be cut again, low can't be put back: two limits, two answers. */
 const judgeHeight = (context: PointContext): Verdict[] => {
@@ -150,15 +148,7 @@ export const finalCut: PointDefinition = {
     ];
   },
   judge: (context) => [
-    ...judgeRange(context, {
-      limit: 'fluid.below-weld',
-      kind: 'hold',
-      about: ['fluid.below-weld'],
-      measured: context.number('fluid.below-weld'),
-      min: fluidBelowWeldIn,
-      unit: 'in',
-      source: commonPractice,
-    }),
+    ...judgeFluidBelowWeld(context),
     ...judgeCheck(context, 'fluid.no-water', 'hold'),
     ...judgeStringHeight(context),
     ...judgeStringMoved(context),

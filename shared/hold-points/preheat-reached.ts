@@ -5,7 +5,7 @@ import { answer, computed } from './computing';
 import type { PointContext } from './context';
 import type { GroupDefinition, PointDefinition } from './definition';
 import { byQuarter, check, choice, instrument, quantity, quarters } from './fields';
-import { fluidBelowWeldIn } from './final-cut';
+import { judgeFluidBelowWeld } from './fluid-in-casing';
 import { byDrawing, byProcedure, commonPractice, judgeCheck, judgeFact, judgeRange, standard } from './judging';
 import { doneBefore } from './done-before';
 import { judgePlugsOut } from './plug-in-port';
@@ -178,16 +178,7 @@ export const preheatReached: PointDefinition = {
     ...judgeDistance(context),
     ...judgeCheck(context, 'joint-dry', 'stop'),
     ...judgeCheck(context, 'joint-sheltered', 'stop'),
-    ...judgeRange(context, {
-      limit: 'fluid.below-weld',
-      kind: 'hold',
-      about: ['fluid.below-weld'],
-      measured: context.number('fluid.below-weld'),
-      min: fluidBelowWeldIn,
-      unit: 'in',
-      source: commonPractice,
-      says: 'fluid-still-below-weld',
-    }),
+    ...judgeFluidBelowWeld(context, 'fluid-still-below-weld'),
     ...judgeAdvice(context),
   ],
   beforeAct: (context, act) => [
