@@ -1,4 +1,5 @@
 import { sequenceOf } from '../hold-points/sequence';
+import { beginSetting } from './begin-setting';
 import type { JobEvent, JobEventOf } from './events';
 import { blankPoint, changePoint, counts, hasEvidence, noEvidence, openNext } from './points';
 import type { Evidence, JobState, PointState } from './state';
@@ -15,7 +16,13 @@ const evidenceOf = ({ readings, photos, acts, concessions, presentation, release
 /** Shuts a point and keeps what was recorded at it as superseded. */
 const supersede = (point: PointState): PointState =>
   hasEvidence(point) || point.release
-    ? { ...point, ...noEvidence(), status: 'shut', openedAt: null, superseded: [...point.superseded, evidenceOf(point)] }
+    ? {
+        ...point,
+        ...noEvidence(),
+        status: 'shut',
+        openedAt: null,
+        superseded: [...point.superseded, evidenceOf(point)],
+      }
     : { ...point, ...noEvidence(), status: 'shut', openedAt: null };
 
 const released = (state: JobState, event: JobEventOf<'point-released'>): JobState => {
@@ -68,16 +75,13 @@ const settingBegun = (state: JobState, event: JobEventOf<'setting-begun'>): JobS
   const { setting, head, targetHeightIn, reason, actor, at } = event.body;
   const { points, site } = state;
   const earlier = { setting: state.setting, reason, points, site, ended: { by: actor, at } };
+  const plan = { ...state.plan, head, terms: { ...state.plan.terms, targetHeightIn } };
   return {
     ...state,
+    ...beginSetting(plan, at),
     setting,
-    rounds: [],
-    plan: { ...state.plan, head, terms: { ...state.plan.terms, targetHeightIn } },
+    plan,
     earlierSettings: [...state.earlierSettings, earlier],
-    site: {},
-    points: openNext(sequenceOf(state.plan.procedure.passes.length, []).map(blankPoint), at),
-    custody: Array.from({ length: head.ports }, (_, index) => ({ port: index + 1, out: false, where: null, holder: null, back: null })),
-    headSet: false,
   };
 };
 

@@ -1,8 +1,7 @@
-import { sequenceOf } from '../hold-points/sequence';
+import { beginSetting } from './begin-setting';
 import { evolveEvidence } from './evolve-evidence';
 import { evolveSequence } from './evolve-sequence';
 import type { JobEvent, JobEventOf } from './events';
-import { blankPoint, openNext } from './points';
 import type { JobState } from './state';
 
 const planned = (jobId: string, event: JobEventOf<'job-planned'>): JobState => {
@@ -13,20 +12,10 @@ const planned = (jobId: string, event: JobEventOf<'job-planned'>): JobState => {
     plan,
     definitions,
     setting: 1,
-    rounds: [],
-    points: openNext(sequenceOf(plan.procedure.passes.length, []).map(blankPoint), at),
-    site: {},
+    ...beginSetting(plan, at),
     earlierSettings: [],
     direction: null,
     proposedDirection: plan.proposedDirection,
-    custody: Array.from({ length: plan.head.ports }, (_, index) => ({
-      port: index + 1,
-      out: false,
-      where: null,
-      holder: null,
-      back: null,
-    })),
-    headSet: false,
     stopped: null,
     handovers: [],
     termsChanges: [],

@@ -3,6 +3,7 @@ import { contextOf } from '../../shared/hold-points/context';
 import type { PointKind, PointPlace } from '../../shared/hold-points/points';
 import { sequenceOf } from '../../shared/hold-points/sequence';
 import type { Times } from '../../shared/job/actor';
+import { beginSetting } from '../../shared/job/begin-setting';
 import type { JobPlan } from '../../shared/job/plan';
 import type { ActRun, JobState, PointState, Reading } from '../../shared/job/state';
 import { aPlan, helper, toolPusher, welder } from './a-plan';
@@ -132,20 +133,13 @@ export const aPointContext = (spec: PointSpec & StateSpec): PointContext => {
     plan,
     definitions: 1,
     setting: 1,
+    ...beginSetting(plan, timesAt(noon)),
     rounds,
     points,
     site: readingsOf('site', spec.site),
     earlierSettings: [],
     direction: { direction: 'mud-tanks', words: null, by: { ...toolPusher, role: 'tool_pusher' }, at: timesAt(noon) },
     proposedDirection: plan.proposedDirection,
-    custody: Array.from({ length: plan.head.ports }, (_, index) => ({
-      port: index + 1,
-      out: false,
-      where: null,
-      holder: null,
-      back: null,
-    })),
-    headSet: false,
     stopped: null,
     handovers: [],
     termsChanges: [],
