@@ -1,5 +1,7 @@
 import { z } from 'zod';
 import { settingNames } from '../job/plan';
+import { decimal } from './decimal';
+import { termsOfJob } from './terms';
 
 /**
  * The commands that move a job, as they travel and as they wait in the outbox. Secrets are in none of them.
@@ -11,7 +13,6 @@ const instant = z.iso.datetime({ offset: true });
 const sha256 = z.string().regex(/^[0-9a-f]{64}$/);
 const pointId = z.string().regex(/^[a-z0-9-]{3,60}$/);
 const fieldKey = z.string().regex(/^[a-z0-9.-]{1,80}$/);
-const decimal = z.string().regex(/^-?\d{1,9}(\.\d{1,9})?$/);
 const person = z.strictObject({ accountId: z.uuid().nullable(), name: short });
 const range = z.strictObject({ min: decimal, max: decimal });
 /** What the signer saw: part of the signed content. */
@@ -29,18 +30,13 @@ const entry = z.strictObject({
 
 const setting = z.strictObject({ value: decimal, source: z.enum(['common-practice', 'job']) });
 const settings = z.strictObject(
-  Object.fromEntries(settingNames.map((name) => [name, setting])) as Record<(typeof settingNames)[number], typeof setting>,
+  Object.fromEntries(settingNames.map((name) => [name, setting])) as Record<
+    (typeof settingNames)[number],
+    typeof setting
+  >,
 );
 const terms = z.strictObject({
-  datum: z.enum(['face', 'outlet', 'base']),
-  targetHeightIn: decimal,
-  standOffIn: decimal,
-  test: z.strictObject({
-    medium: z.enum(['hydraulic-oil', 'nitrogen']),
-    pressurePsi: z.int().min(1).max(20_000),
-    holdMin: z.int().min(1).max(1440),
-    allowedDropPsi: z.int().min(0).max(5000),
-  }),
+  ...termsOfJob,
   settings,
 });
 

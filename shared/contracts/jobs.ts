@@ -3,6 +3,8 @@ import { settingNames } from '../job/plan';
 import { roles } from '../permissions/roles';
 import { commandSchema } from './commands';
 import { defineRoute } from './contract';
+import { decimal } from './decimal';
+import { termsOfJob } from './terms';
 
 /** A job's id as it stands in addresses. */
 export const jobAddress = z.strictObject({ id: z.uuid().lowercase() });
@@ -61,7 +63,6 @@ export const eventsQuery = z.strictObject({ after: z.coerce.number().int().min(0
 /** Where a list goes on: as `next` gave it, never put together by hand. */
 export const pageAfter = z.string().max(120).optional();
 
-const decimal = z.string().regex(/^-?\d{1,9}(\.\d{1,9})?$/);
 const short = z.string().trim().min(1).max(200);
 
 /** A row of the casing table by its three names, or one of the coordinator's own. */
@@ -95,15 +96,7 @@ export const planningSchema = z.strictObject({
     .min(1)
     .max(40),
   terms: z.strictObject({
-    datum: z.enum(['face', 'outlet', 'base']),
-    targetHeightIn: decimal,
-    standOffIn: decimal,
-    test: z.strictObject({
-      medium: z.enum(['hydraulic-oil', 'nitrogen']),
-      pressurePsi: z.int().min(1).max(20_000),
-      holdMin: z.int().min(1).max(1440),
-      allowedDropPsi: z.int().min(0).max(5000),
-    }),
+    ...termsOfJob,
     /** settings that the operator's programme replaces; the others are common practice */
     ownSettings: z.partialRecord(z.enum(settingNames), decimal),
   }),
