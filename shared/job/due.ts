@@ -21,7 +21,7 @@ export const dueAt = (review: PointReview, point: PointState): Due[] => {
   const isRead = ({ key }: PlacedField): boolean => review.context.read(key) !== undefined;
   const placed = new Set<string>();
   const dues: Due[] = [];
-  for (const part of wholeOrder(definitionOf(point.place.kind))) {
+  for (const part of wholeOrder(definitionOf(point.place.kind).order)) {
     if ('act' in part) {
       const act = review.acts.find((one) => one.key === part.act);
       if (isMissing(`act:${part.act}`)) dues.push({ due: 'act', act: part.act });

@@ -1,16 +1,10 @@
 import { convertDifference, convertIfAlike, type UnitLike } from './convert';
 import { toDecimal } from './decimal';
-import { printAmount } from './print-amount';
+import { printAmount, type PrintedQuantity } from './print-amount';
 import { symbolOf, UNITS, type Unit } from './units';
 
 /** What a person reads in. What was typed is kept as typed; this only decides how it is shown. */
 export type UnitSystem = 'imperial' | 'metric';
-
-/** A quantity for reading: the number, and the unit to set beside it in the muted ink. */
-export interface PrintedQuantity {
-  readonly value: string;
-  readonly unit: string;
-}
 
 const metric: Partial<Record<Unit, Unit>> = {
   in: 'mm',

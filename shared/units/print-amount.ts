@@ -1,7 +1,12 @@
 import { toDecimal } from './decimal';
-import type { PrintedQuantity } from './format';
 import { printInches } from './print-inches';
 import { symbolOf, type Unit } from './units';
+
+/** A quantity for reading: the number, and the unit to set beside it in the muted ink. */
+export interface PrintedQuantity {
+  readonly value: string;
+  readonly unit: string;
+}
 
 /** Decimals of a unit: as a person types them off an instrument, and of a value that was worked out. */
 interface Places {

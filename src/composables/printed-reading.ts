@@ -1,6 +1,6 @@
 import type { FieldDefinition } from '../../shared/hold-points/definition';
 import type { Instrument } from '../../shared/job/plan';
-import type { PrintedQuantity } from '../../shared/units/format';
+import type { PrintedQuantity } from '../../shared/units/print-amount';
 import type { PointWords } from './point-words';
 import { useSay } from './say';
 

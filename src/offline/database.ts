@@ -1,6 +1,5 @@
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
-import type { CachedJob } from './job-cache';
-import type { PointDraft } from './drafts';
+import type { CachedJob, PointDraft } from './kept';
 import type { OutboxEntry } from './outbox-entry';
 
 interface HeadfastDatabase extends DBSchema {

@@ -1,14 +1,6 @@
 import type { RecordEntry } from '../../shared/contracts/commands';
 import { database } from './database';
 
-/** Readings typed for a point before it opened, the newest of each field. They are no evidence until they are recorded. */
-export interface PointDraft {
-  accountId: string;
-  jobId: string;
-  point: string;
-  entries: RecordEntry[];
-}
-
 export async function draftOf(accountId: string, jobId: string, point: string): Promise<RecordEntry[]> {
   return (await (await database()).get('drafts', [accountId, jobId, point]))?.entries ?? [];
 }

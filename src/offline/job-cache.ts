@@ -1,13 +1,6 @@
 import type { WireEvent } from '../api/job';
 import { database } from './database';
 
-/** A job as the server last told it to one person. */
-export interface CachedJob {
-  accountId: string;
-  jobId: string;
-  events: WireEvent[];
-}
-
 /** What is kept of a job on this device, so that it opens without a signal; empty when nothing is. */
 export async function cachedEvents(accountId: string, jobId: string): Promise<WireEvent[]> {
   const found = await (await database()).get('jobs', [accountId, jobId]);

@@ -1,6 +1,6 @@
 import type { FieldDefinition } from '../../../shared/hold-points/definition';
 import type { JobState } from '../../../shared/job/state';
-import type { PrintedQuantity } from '../../../shared/units/format';
+import type { PrintedQuantity } from '../../../shared/units/print-amount';
 import type { PointWords } from '../../composables/point-words';
 import { usePrintedReading } from '../../composables/printed-reading';
 
