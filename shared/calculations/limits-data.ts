@@ -42,5 +42,3 @@ export const LIMITS = {
   continuityMonths: limit(6, 'months', 'ASME IX QW-322', null, STATED),
   standOffSmall: limit(30, 'm', 'ASME PCC-2 article 501', null, STATED),
 } as const satisfies Record<string, PublishedLimit>;
-
-export type LimitName = keyof typeof LIMITS;

@@ -1,5 +1,5 @@
 import type { Shown } from '../contracts/commands';
-import type { PointId, PointPlace } from '../hold-points/points';
+import type { PointPlace } from '../hold-points/points';
 import type { RepairRound } from '../hold-points/sequence';
 import type { Verdict } from '../hold-points/verdict';
 import type { ActorStamp, PersonRef, Times } from './actor';
@@ -154,14 +154,15 @@ export interface JobState {
   handovers: { line: string; to: string | null; by: ActorStamp; at: Times }[];
   termsChanges: { reason: string; by: ActorStamp; at: Times; signature: Signature | null }[];
   people: JobPerson[];
-  ended: { kind: 'sealed' | 'called-off'; reason: string | null; by: ActorStamp; at: Times; signature: Signature } | null;
+  ended: {
+    kind: 'sealed' | 'called-off';
+    reason: string | null;
+    by: ActorStamp;
+    at: Times;
+    signature: Signature;
+  } | null;
   eventCount: number;
   lastAt: Times;
-}
-
-export interface PointRef {
-  state: JobState;
-  point: PointId;
 }
 
 export type { Shown };

@@ -14,7 +14,6 @@ export type Seconds = Branded<'s'>;
 export type Volts = Branded<'V'>;
 export type Amperes = Branded<'A'>;
 export type Percent = Branded<'pct'>;
-export type PartsPerMillion = Branded<'ppm'>;
 
 export const inches = (value: number): Inches => value as Inches;
 export const feet = (value: number): Feet => value as Feet;
@@ -28,4 +27,3 @@ export const seconds = (value: number): Seconds => value as Seconds;
 export const volts = (value: number): Volts => value as Volts;
 export const amperes = (value: number): Amperes => value as Amperes;
 export const percent = (value: number): Percent => value as Percent;
-export const partsPerMillion = (value: number): PartsPerMillion => value as PartsPerMillion;
