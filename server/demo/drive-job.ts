@@ -3,9 +3,9 @@ import { createHash } from 'node:crypto';
 import type { Command, CommandOf, CommandType, Shown } from '../../shared/contracts/commands';
 import type { Planning } from '../../shared/contracts/jobs';
 import { ownerOf } from '../../shared/hold-points/points';
+import { asEvent } from '../../shared/job/as-event';
 import { contentHashOf, jobContentHashOf } from '../../shared/job/content';
 import { concessionTotal } from '../../shared/job/decide-failure';
-import type { JobEvent } from '../../shared/job/events';
 import { evolve } from '../../shared/job/evolve';
 import { currentPoint, findPoint } from '../../shared/job/points';
 import { reviewPoint } from '../../shared/job/review';
@@ -69,9 +69,7 @@ export class DemoJob {
     const then = { dataSource: this.deps.dataSource, clock: () => new Date(this.now) };
     const answer = await commitCommand(then, { actor, jobId: this.state.id, command });
     if (!answer.ok) throw new Error(`the demo's ${type} was not taken: ${JSON.stringify(answer)}`);
-    for (const { type: of, schema, body: content } of answer.events) {
-      this.state = evolve(this.state.id, this.state, { type: of, schema, body: content } as unknown as JobEvent);
-    }
+    for (const event of answer.events) this.state = evolve(this.state.id, this.state, asEvent(event));
     return this;
   }
 

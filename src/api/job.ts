@@ -1,7 +1,6 @@
 import type { Command } from '../../shared/contracts/commands';
 import type { ResponseOf } from '../../shared/contracts/contract';
 import type { JobEvents, sendCommand as commandRoute, WireEvent } from '../../shared/contracts/jobs';
-import type { JobEvent } from '../../shared/job/events';
 import type { SigningSecrets } from './signing';
 import { ask } from './client';
 import type { Answer } from './problem';
@@ -33,6 +32,3 @@ export const sendFile = (jobId: string, sha256: string, bytes: Blob): Promise<An
 
 /** Where a photo of the job is fetched. */
 export const fileAddress = (jobId: string, sha256: string): string => `${place(jobId)}/files/${sha256}`;
-
-/** An event as the rules read it. */
-export const asEvent = ({ type, schema, body }: WireEvent): JobEvent => ({ type, schema, body }) as unknown as JobEvent;

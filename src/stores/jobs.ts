@@ -1,8 +1,9 @@
 import { defineStore } from 'pinia';
 import { shallowReactive } from 'vue';
+import { asEvent } from '../../shared/job/as-event';
 import { evolve } from '../../shared/job/evolve';
 import type { JobState } from '../../shared/job/state';
-import { asEvent, readEvents, type WireEvent } from '../api/job';
+import { readEvents, type WireEvent } from '../api/job';
 import type { Problem } from '../api/problem';
 import { cachedEvents, cacheEvents } from '../offline/job-cache';
 import { listenToTabs } from '../offline/tabs';

@@ -1,11 +1,12 @@
 import { defineStore } from 'pinia';
 import { ref, shallowRef } from 'vue';
+import { asEvent } from '../../shared/job/as-event';
 import { checkSignatures, type SignatureCheck } from '../../shared/job/check-signatures';
 import type { JobEvent } from '../../shared/job/events';
 import { storyOf, type Story } from '../../shared/job/story';
 import { canonicalJson } from '../../shared/ledger/canonical-json';
 import { verifyChain, type ChainVerdict } from '../../shared/ledger/chain';
-import { asEvent, type WireEvent } from '../api/job';
+import type { WireEvent } from '../api/job';
 import { askPacket, askPacketEvents, type PacketAnswer } from '../api/packets';
 import type { Answer, Problem } from '../api/problem';
 import { hashText } from '../offline/hash-text';

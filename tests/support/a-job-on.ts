@@ -6,6 +6,7 @@ import { signedCommands } from '../../shared/contracts/commands';
 import type { Command, CommandOf, CommandType, Shown } from '../../shared/contracts/commands';
 import type { Planning, WireEvent } from '../../shared/contracts/jobs';
 import { ownerOf } from '../../shared/hold-points/points';
+import { asEvent } from '../../shared/job/as-event';
 import { contentHashOf, jobContentHashOf } from '../../shared/job/content';
 import { concessionTotal } from '../../shared/job/decide-failure';
 import type { JobEvent } from '../../shared/job/events';
@@ -63,8 +64,8 @@ export class JobOn {
   }
 
   private take(events: WireEvent[]): void {
-    for (const { seq, type, schema, body } of events) {
-      if (seq === this.events.length + 1) this.events.push({ type, schema, body } as unknown as JobEvent);
+    for (const event of events) {
+      if (event.seq === this.events.length + 1) this.events.push(asEvent(event));
     }
   }
 

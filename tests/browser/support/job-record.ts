@@ -1,6 +1,6 @@
 import { expect, type Page } from '@playwright/test';
 import type { JobEvents } from '../../../shared/contracts/jobs';
-import type { JobEvent } from '../../../shared/job/events';
+import { asEvent } from '../../../shared/job/as-event';
 import { foldEvents } from '../../../shared/job/evolve';
 import type { JobState } from '../../../shared/job/state';
 
@@ -19,10 +19,7 @@ export async function eventsOf(page: Page, jobId: string): Promise<JobEvents['ev
 /** The job as the server has it: tests look at it to know what is asked next, and never write that way. */
 export async function readJob(page: Page, jobId: string): Promise<JobState> {
   const events = await eventsOf(page, jobId);
-  const state = foldEvents(
-    jobId,
-    events.map(({ type, schema, body }) => ({ type, schema, body }) as unknown as JobEvent),
-  );
+  const state = foldEvents(jobId, events.map(asEvent));
   if (state === null) throw new Error('the job has no events');
   return state;
 }
