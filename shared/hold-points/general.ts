@@ -55,10 +55,32 @@ const judgeActTimes = (context: PointContext): Verdict[] =>
         }).map((verdict) => ({ ...verdict, basis: [run.id] })),
   );
 
+/**
+ * A time that lies ahead of when it was typed was not seen on any watch: rods, cooling and the hold would be aged by it.
+ * A permit's expiry is meant to lie ahead. Two clocks may differ by a little.
+ */
+const judgeAhead = (context: PointContext, fields: FieldDefinition[]): Verdict[] =>
+  fields
+    .filter(({ key, of }) => of.type === 'time' && key !== 'permit.expires')
+    .flatMap(({ key }) => {
+      const reading = context.read(key);
+      return judgeFact(context, {
+        limit: `${key}.ahead`,
+        kind: 'stop',
+        about: [key],
+        source: commonPractice,
+        says: 'time-ahead',
+        params: { time: { instant: reading?.value ?? '' } },
+        holds: reading && minutesBetween(reading.at.corrected, reading.value) <= clocksDifferMin,
+      });
+    })
+    .filter((verdict) => verdict.outcome === 'outside');
+
 /** What is judged the same way at every point: instruments, clocks, and what an act's beginning found. */
 export const generalVerdicts = (context: PointContext, fields: FieldDefinition[]): Verdict[] => [
   ...fields.filter((field) => field.of.type === 'instrument').flatMap((field) => judgeInstrument(context, field)),
   ...judgePossible(context, fields),
+  ...judgeAhead(context, fields),
   ...judgeClock(context, fields),
   ...judgeActTimes(context),
   ...context.point.acts.flatMap((run, index) =>

@@ -69,6 +69,10 @@ export default {
     outside:
       '{act}: its times are not sure, because a clock was not checked or two clocks contradict each other. Let the company representative concede it.',
   },
+  'time-ahead': {
+    within: 'The time had come when it was typed.',
+    outside: '{time} lies ahead of when it was typed. Type the time that the watch showed.',
+  },
   'instrument-listed': {
     within: '{name} is on the job’s list.',
     outside: '{name} is not on this job’s list for such a reading. Choose one that is.',
