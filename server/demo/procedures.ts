@@ -45,7 +45,22 @@ export const demoProcedures: readonly Procedure[] = [
     insideLegIn: '0.375',
     preheatDistance: 'iso-13916',
     surfaceExam: 'magnetic-particle',
-    chemistry: { cet: '0.33', thicknessMm: '40', hydrogenMl: '3', heatInputKjPerMm: '1.5' },
+    chemistry: {
+      composition: {
+        carbon: '0.22',
+        manganese: '0.95',
+        silicon: '0.25',
+        chromium: '0.1',
+        molybdenum: '0.03',
+        vanadium: '0.01',
+        nickel: '0.05',
+        copper: '0.1',
+        boron: '0',
+      },
+      thicknessMm: '40',
+      hydrogenMl: '3',
+      heatInputKjPerMm: '1.5',
+    },
     passes: [
       ...(['root', 'hot-pass', 'fill', 'cap'] as const).map((name) => lowHydrogen(name, 'outside', 'E8018')),
       ...(['root', 'cap'] as const).map((name) => lowHydrogen(name, 'inside', 'E8018')),

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { settingNames } from '../job/plan';
+import { elements, settingNames } from '../job/plan';
 import { decimal } from './decimal';
 import { termsOfJob } from './terms';
 
@@ -86,7 +86,17 @@ const procedure = z.strictObject({
   preheatDistance: z.enum(['aws-d1.1', 'iso-13916']),
   surfaceExam: z.enum(['none', 'magnetic-particle', 'penetrant']),
   chemistry: z
-    .strictObject({ cet: decimal, thicknessMm: decimal, hydrogenMl: decimal, heatInputKjPerMm: decimal })
+    .strictObject({
+      composition: z.strictObject(
+        Object.fromEntries(elements.map((name) => [name, decimal])) as Record<
+          (typeof elements)[number],
+          typeof decimal
+        >,
+      ),
+      thicknessMm: decimal,
+      hydrogenMl: decimal,
+      heatInputKjPerMm: decimal,
+    })
     .nullable(),
   passes: z.array(pass).min(1).max(12),
 });

@@ -1,4 +1,5 @@
 import type { InstrumentKind } from '../job/plan';
+import type { Text } from '../locales/text';
 import type { Unit } from '../units/units';
 import type { PointContext } from './context';
 import type { Part } from './order';
@@ -33,6 +34,8 @@ export interface FieldDefinition {
   confirms?: string;
   /** outside this the screen asks whether it was typed right; it never refuses */
   likely?: { min: number; max: number };
+  /** what the job knows that helps to answer */
+  hint?: Text;
 }
 
 /** Fields that are read together. A group with `rows` repeats: `rods.1.amps`, `rods.2.amps`, ... */

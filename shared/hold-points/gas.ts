@@ -1,3 +1,4 @@
+import { LIMITS } from '../calculations/limits-data';
 import { clockIsDoubtful, minutesBetween } from '../job/actor';
 import type { PointContext } from './context';
 import type { GroupDefinition } from './definition';
@@ -28,11 +29,7 @@ export const gasGroups = (): GroupDefinition[] => [
   })),
   {
     key: 'gas-meter',
-    fields: [
-      meterField,
-      check('gas.bump-tested', { site: true }),
-      check('gas.monitor', { site: true }),
-    ],
+    fields: [meterField, check('gas.bump-tested', { site: true }), check('gas.monitor', { site: true })],
   },
 ];
 
@@ -73,15 +70,33 @@ export const judgeGas = (context: PointContext): Verdict[] =>
     });
     return [
       ...gases.flatMap((gas) => judgeZeroed(context, at(gas.key), gas.unit)),
-      ...judgeRange(context, { ...held('oxygen'), unit: 'pct', min: 19.5, max: 23.5, source: standard('29 CFR 1910.146(b)') }),
+      ...judgeRange(context, {
+        ...held('oxygen'),
+        unit: 'pct',
+        min: LIMITS.oxygenLow.value,
+        max: LIMITS.oxygenHigh.value,
+        source: standard(LIMITS.oxygenLow.source),
+      }),
       ...judgeRange(context, {
         ...held('flammable'),
         unit: 'pct',
         max: Math.min(context.setting('lelMaxPct'), 9.9),
         source: bySetting(context, 'lelMaxPct'),
       }),
-      ...judgeRange(context, { ...held('h2s'), unit: 'ppm', max: 10, exclusiveMax: true, source: standard('NIOSH ceiling for H2S') }),
-      ...judgeRange(context, { ...held('co'), unit: 'ppm', max: 35, exclusiveMax: true, source: standard('NIOSH REL for CO') }),
+      ...judgeRange(context, {
+        ...held('h2s'),
+        unit: 'ppm',
+        max: LIMITS.hydrogenSulphide.value,
+        exclusiveMax: true,
+        source: standard(`${LIMITS.hydrogenSulphide.source} for H2S`),
+      }),
+      ...judgeRange(context, {
+        ...held('co'),
+        unit: 'ppm',
+        max: LIMITS.carbonMonoxide.value,
+        exclusiveMax: true,
+        source: standard(`${LIMITS.carbonMonoxide.source} for CO`),
+      }),
     ];
   });
 
@@ -137,7 +152,14 @@ export const judgeFlame = (context: PointContext, at: string): Verdict[] => {
   const air = judgeGas(context);
   return [
     ...(oldest === undefined
-      ? judgeFact(context, { limit: 'gas-fresh', kind: 'stop', about: readingKeys, source: bySetting(context, 'gasFreshMin'), says: 'gas-missing', holds: false })
+      ? judgeFact(context, {
+          limit: 'gas-fresh',
+          kind: 'stop',
+          about: readingKeys,
+          source: bySetting(context, 'gasFreshMin'),
+          says: 'gas-missing',
+          holds: false,
+        })
       : judgeRange(context, {
           limit: 'gas-fresh',
           kind: 'stop',

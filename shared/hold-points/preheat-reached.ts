@@ -1,3 +1,4 @@
+import { carbonEquivalent, carbonEquivalentInfo } from '../calculations/carbon-equivalent';
 import { preheatAdvice, preheatAdviceInfo } from '../calculations/preheat-advice';
 import { preheatDistance } from '../calculations/preheat-distance';
 import type { JobPlan } from '../job/plan';
@@ -109,12 +110,32 @@ const judgeDistance = (context: PointContext): Verdict[] => {
   });
 };
 
+/** The steel's carbon equivalents; undefined while nobody has its mill certificate. */
+const equivalentOf = (context: PointContext) => {
+  const steel = context.state.plan.procedure.chemistry?.composition;
+  if (!steel) return undefined;
+  return answer(
+    carbonEquivalent({
+      carbonPct: Number(steel.carbon),
+      manganesePct: Number(steel.manganese),
+      siliconPct: Number(steel.silicon),
+      chromiumPct: Number(steel.chromium),
+      molybdenumPct: Number(steel.molybdenum),
+      vanadiumPct: Number(steel.vanadium),
+      nickelPct: Number(steel.nickel),
+      copperPct: Number(steel.copper),
+      boronPct: Number(steel.boron),
+    }),
+  );
+};
+
 const advisedF = (context: PointContext): number | undefined => {
   const { chemistry } = context.state.plan.procedure;
-  if (!chemistry) return undefined;
+  const cetPct = equivalentOf(context)?.cetPct;
+  if (!chemistry || cetPct === undefined) return undefined;
   return answer(
     preheatAdvice({
-      cetPct: Number(chemistry.cet),
+      cetPct,
       thicknessMm: Number(chemistry.thicknessMm),
       hydrogenMlPer100g: Number(chemistry.hydrogenMl),
       heatInputKjPerMm: Number(chemistry.heatInputKjPerMm),
@@ -149,6 +170,7 @@ const compute = (context: PointContext): Computed[] => {
   return [
     ...computed('lowest', metal?.lowest, 'degF', extremesInfo),
     ...computed('highest', metal?.highest, 'degF', extremesInfo),
+    ...computed('carbon-equivalent', equivalentOf(context)?.iiwPct, 'pct', carbonEquivalentInfo),
     ...computed('advice-preheat', advisedF(context), 'degF', preheatAdviceInfo),
   ];
 };

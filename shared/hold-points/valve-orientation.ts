@@ -1,7 +1,8 @@
 import { fitUpGapInfo } from '../calculations/fit-up-gap';
 import { computed } from './computing';
 import type { PointContext } from './context';
-import type { PointDefinition } from './definition';
+import { text } from '../locales/text';
+import type { FieldDefinition, PointDefinition } from './definition';
 import { byQuarter, check, choice } from './fields';
 import { gapToAddIn, judgeGaps } from './fit-up-gaps';
 import { commonPractice, judgeFact } from './judging';
@@ -10,6 +11,12 @@ import { computeOrientation, judgeOrientation, orientationGroups } from './orien
 import type { Verdict } from './verdict';
 
 const hasSeal = (context: PointContext): boolean => context.state.plan.head.seals > 0;
+
+/** Whoever looks must be told which way it should point, and not have to remember it. */
+const facingHint = (context: PointContext): Pick<FieldDefinition, 'hint'> =>
+  context.state.direction === null
+    ? {}
+    : { hint: text('points.valve-orientation.hints.faces', { direction: namedDirection(context) }) };
 
 /** The two holes alone can't tell one hole pitch from the next: somebody has to look where the valve points. */
 const judgeFacing = (context: PointContext): Verdict[] => {
@@ -42,7 +49,7 @@ export const valveOrientation: PointDefinition = {
   kind: 'valve-orientation',
   version: 1,
   groups: (context) => [
-    { key: 'facing', fields: [check('faces')] },
+    { key: 'facing', fields: [check('faces', facingHint(context))] },
     ...orientationGroups(context, 'set'),
     { key: 'gap', fields: byQuarter('gap', 'in', { likely: { min: 0, max: 0.25 } }), picture: 'clock' },
     ...(hasSeal(context)

@@ -72,6 +72,28 @@ export interface ProcedurePass {
   interpassF: Range;
 }
 
+export const elements = [
+  'carbon',
+  'manganese',
+  'silicon',
+  'chromium',
+  'molybdenum',
+  'vanadium',
+  'nickel',
+  'copper',
+  'boron',
+] as const;
+export type Element = (typeof elements)[number];
+
+/** The steel as its mill certificate has it (mass %), with what the preheat advice needs beside it. */
+export interface Chemistry {
+  composition: Record<Element, Decimal>;
+  thicknessMm: Decimal;
+  /** diffusible hydrogen of the electrode, ml per 100 g of weld metal */
+  hydrogenMl: Decimal;
+  heatInputKjPerMm: Decimal;
+}
+
 /** A welding procedure in one revision. It governs; Headfast only holds the work against it. */
 export interface Procedure {
   id: string;
@@ -86,8 +108,8 @@ export interface Procedure {
   preheatDistance: 'aws-d1.1' | 'iso-13916';
   /** surface examination asked for at the cold look */
   surfaceExam: 'none' | 'magnetic-particle' | 'penetrant';
-  /** heat analysis for the preheat advice, when the mill certificate is at hand: mass %, thickness mm, ml/100 g, kJ/mm */
-  chemistry: { cet: Decimal; thicknessMm: Decimal; hydrogenMl: Decimal; heatInputKjPerMm: Decimal } | null;
+  /** for the preheat advice, when the mill certificate is at hand; a grade's name fixes no chemistry */
+  chemistry: Chemistry | null;
   passes: ProcedurePass[];
 }
 

@@ -146,7 +146,9 @@ export function takeJobInHand(id: MaybeRefOrGetter<string>): JobInHand {
       const inFront = files.map((file) => ({ kind: 'file' as const, body: file }));
       try {
         await outbox.put(jobId.value, [...inFront, { kind: 'command', body: command }]);
-      } catch {
+      } catch (error) {
+        // what cannot be copied is a fault of ours and must not pass for a full device
+        if (error instanceof DOMException && error.name === 'DataCloneError') throw error;
         return { ok: false, refusal: null, problem: null, says: { key: 'refusals.device-full' } };
       }
       return { ok: true };

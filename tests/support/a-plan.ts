@@ -1,4 +1,4 @@
-import type { Head, JobPlan, Procedure, ProcedurePass, SettingName, Terms } from '../../shared/job/plan';
+import type { Chemistry, Head, JobPlan, Procedure, ProcedurePass, SettingName, Terms } from '../../shared/job/plan';
 import { settingsWith } from '../../shared/job/settings';
 
 /** The people of the invented job, by role. */
@@ -44,6 +44,19 @@ const pass = (name: ProcedurePass['name'], own: Partial<ProcedurePass> = {}): Pr
   heatInputKjPerIn: { min: '14', max: '32' },
   interpassF: { min: '250', max: '450' },
   ...own,
+});
+
+/** A steel of iron and carbon alone: its carbon equivalents are its carbon. */
+export const carbonAlone = (carbon: string): Chemistry['composition'] => ({
+  carbon,
+  manganese: '0',
+  silicon: '0',
+  chromium: '0',
+  molybdenum: '0',
+  vanadium: '0',
+  nickel: '0',
+  copper: '0',
+  boron: '0',
 });
 
 /** Four passes of E8018 under preheat. */

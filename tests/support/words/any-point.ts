@@ -8,7 +8,7 @@ import type { Verdict } from '../../../shared/hold-points/verdict';
 import type { JobPlan } from '../../../shared/job/plan';
 import { reviewPoint, type PointReview } from '../../../shared/job/review';
 import type { JobState } from '../../../shared/job/state';
-import { aPlan, toolPusher, welder, type PlanOverrides } from '../a-plan';
+import { aPlan, carbonAlone, toolPusher, welder, type PlanOverrides } from '../a-plan';
 import { aPointContext, noon, type ReadingSpecs } from '../a-point';
 
 /** Plans that ask for every kind of answer: datum, seals, welds, ports, medium, examination, chemistry. */
@@ -20,7 +20,7 @@ const overrides: PlanOverrides[] = [
     head: { seals: 0, sealAboveBaseIn: [], sealRatedPsi: null },
     procedure: {
       preheatDistance: 'iso-13916',
-      chemistry: { cet: '0.42', thicknessMm: '12', hydrogenMl: '5', heatInputKjPerMm: '1' },
+      chemistry: { composition: carbonAlone('0.42'), thicknessMm: '12', hydrogenMl: '5', heatInputKjPerMm: '1' },
     },
   },
   {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { definitionOf } from '../../../shared/hold-points/definitions';
-import { aPlan } from '../../support/a-plan';
+import { aPlan, carbonAlone } from '../../support/a-plan';
 import { aPointContext, noon, type ReadingSpecs } from '../../support/a-point';
 import {
   computedOf,
@@ -90,16 +90,17 @@ describe('preheat reached', () => {
   });
 
   it('gives the advice of the steel only when its chemistry is known, and never blocks by it', () => {
-    const chemistry = { cet: '0.4225', thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
+    const chemistry = { composition: carbonAlone('0.4225'), thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
     const context = heated({}, aPlan({ procedure: { chemistry } }));
     expect(judged(context, 'preheat-advised')).toBe('advice outside');
     expect(Number(computedOf(context)['advice-preheat'])).toBeCloseTo(329.09, 1);
+    expect(computedOf(context)['carbon-equivalent']).toBe('0.4225');
     expect(judged(heated(metal(330), aPlan({ procedure: { chemistry } })), 'preheat-advised')).toBe('advice within');
     expect(judged(heated({}), 'preheat-advised')).toBeUndefined();
   });
 
   it('gives no advice outside the range of the method', () => {
-    const chemistry = { cet: '0.52', thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
+    const chemistry = { composition: carbonAlone('0.52'), thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
     const context = heated({}, aPlan({ procedure: { chemistry } }));
     expect(judged(context, 'preheat-advised')).toBeUndefined();
     expect(computedOf(context)['advice-preheat']).toBeUndefined();
@@ -140,7 +141,7 @@ describe('preheat reached', () => {
   });
 
   it('has words for all that it shows', () => {
-    const chemistry = { cet: '0.4225', thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
+    const chemistry = { composition: carbonAlone('0.4225'), thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
     const context = aPointContext({
       kind,
       round: 1,

@@ -26,6 +26,7 @@ export default {
   work: 'Go to {title}',
   look: 'Look at {title}',
   released: '{name}, {at}',
+  carried: 'Failed; repair round {round} took it over',
   toJobs: 'All jobs',
   loading: 'The job is being loaded.',
   site: {

@@ -37,6 +37,7 @@ export default {
   computed: {
     lowest: 'Lowest reading',
     highest: 'Highest reading',
+    'carbon-equivalent': 'Carbon equivalent of this steel by IIW',
     'advice-preheat': 'Preheat advised for this steel by EN 1011-2 method B',
   },
   choices: {

@@ -2,6 +2,7 @@ import { orientationComputed, orientationFields, orientationGroupTitles } from '
 
 export default {
   title: 'Valve orientation',
+  hints: { faces: 'The tool pusher named: {direction}. Stand where you can see it.' },
   lead: 'Show that the valve faces where the tool pusher wants it, and that the flange is square, level and at its height.',
   groups: {
     facing: 'Which way it faces',
