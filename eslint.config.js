@@ -6,7 +6,10 @@ import tseslint from 'typescript-eslint';
 
 /** The house's arrows: src -> shared <- server, never across, never back. */
 const forbid = (...patterns) => ({
-  'no-restricted-imports': ['error', { patterns: patterns.map((group) => ({ group: [group.glob], message: group.why })) }],
+  'no-restricted-imports': [
+    'error',
+    { patterns: patterns.map((group) => ({ group: [group.glob], message: group.why })) },
+  ],
 });
 const rooms = {
   src: { glob: '**/src/**', why: 'src is the browser side; move what both need to shared/.' },
@@ -46,7 +49,16 @@ export default tseslint.config(
     files: ['shared/**/*.ts'],
     rules: {
       ...forbid(rooms.src, rooms.server, rooms.node, rooms.framework, rooms.pinia, rooms.express, rooms.typeorm),
-      'no-restricted-globals': ['error', 'window', 'document', 'process', 'fetch', 'setTimeout', 'performance', 'crypto'],
+      'no-restricted-globals': [
+        'error',
+        'window',
+        'document',
+        'process',
+        'fetch',
+        'setTimeout',
+        'performance',
+        'crypto',
+      ],
       'no-restricted-properties': [
         'error',
         { object: 'Date', property: 'now', message: 'shared/ has no clock; take now as an argument.' },
@@ -54,15 +66,27 @@ export default tseslint.config(
       ],
       'no-restricted-syntax': [
         'error',
-        { selector: "NewExpression[callee.name='Date'][arguments.length=0]", message: 'shared/ has no clock; take now as an argument.' },
+        {
+          selector: "NewExpression[callee.name='Date'][arguments.length=0]",
+          message: 'shared/ has no clock; take now as an argument.',
+        },
       ],
     },
   },
   { files: ['src/**/*.{ts,vue}'], rules: forbid(rooms.server, rooms.node) },
   { files: ['src/components/**/*.{ts,vue}'], rules: forbid(rooms.server, rooms.node, rooms.views) },
-  { files: ['src/composables/**/*.ts', 'src/stores/**/*.ts'], rules: forbid(rooms.server, rooms.node, rooms.views, rooms.components) },
-  { files: ['src/offline/**/*.ts', 'src/api/**/*.ts'], rules: forbid(rooms.server, rooms.node, rooms.views, rooms.components, rooms.stores) },
+  {
+    files: ['src/composables/**/*.ts', 'src/stores/**/*.ts'],
+    rules: forbid(rooms.server, rooms.node, rooms.views, rooms.components),
+  },
+  {
+    files: ['src/offline/**/*.ts', 'src/api/**/*.ts'],
+    rules: forbid(rooms.server, rooms.node, rooms.views, rooms.components, rooms.stores),
+  },
   { files: ['server/**/*.ts'], rules: forbid(rooms.src) },
-  { files: ['server/services/**/*.ts', 'server/ledger/**/*.ts', 'server/entities/**/*.ts'], rules: forbid(rooms.src, rooms.routes, rooms.express) },
+  {
+    files: ['server/services/**/*.ts', 'server/ledger/**/*.ts', 'server/entities/**/*.ts'],
+    rules: forbid(rooms.src, rooms.routes, rooms.express),
+  },
   { files: ['scripts/**', 'tests/**', '*.config.{js,ts}'], rules: { 'no-console': 'off' } },
 );

@@ -5,7 +5,13 @@ import { defineConfig } from 'vitest/config';
 export default defineConfig({
   test: {
     projects: [
-      { test: { name: 'unit', include: ['tests/unit/**/*.test.ts', 'tests/reference/**/*.test.ts'], environment: 'node' } },
+      {
+        test: {
+          name: 'unit',
+          include: ['tests/unit/**/*.test.ts', 'tests/reference/**/*.test.ts'],
+          environment: 'node',
+        },
+      },
       {
         plugins: [vue()],
         test: { name: 'components', include: ['tests/components/**/*.test.ts'], environment: 'happy-dom' },

@@ -71,7 +71,10 @@ const straightedge = (input: PlanViewInput, lean: number): Primitive[] => {
           {
             kind: 'label' as const,
             at: { x: centre.x, y: y - 8 },
-            text: { key: 'drawing.plan.straightedge', params: { length: { quantity: toDecimal(input.lengthIn), unit: 'in' } } },
+            text: {
+              key: 'drawing.plan.straightedge',
+              params: { length: { quantity: toDecimal(input.lengthIn), unit: 'in' } },
+            },
             anchor: 'middle' as const,
             size: 'small' as const,
             tone: 'soft' as const,
@@ -85,16 +88,28 @@ const valve = (input: PlanViewInput, lean: number): Primitive[] => {
   const degrees = (input.bearingDeg ?? 90) + lean;
   const at = onCircle(centre, flange + 46, degrees);
   // at the side the words stand above the arrow's shaft, clear of the flange's edge
-  const besides = (tip: Point): number => (tip.y > centre.y + 60 ? height - 24 : Math.abs(tip.x - centre.x) > 60 ? Math.min(tip.y + flange * 0.62, height - 26) : tip.y + 26);
+  const besides = (tip: Point): number =>
+    tip.y > centre.y + 60
+      ? height - 24
+      : Math.abs(tip.x - centre.x) > 60
+        ? Math.min(tip.y + flange * 0.62, height - 26)
+        : tip.y + 26;
   return [
-    { kind: 'arrow', from: onCircle(centre, flange, degrees), to: onCircle(centre, flange + 40, degrees), tone: 'ink', heavy: true },
+    {
+      kind: 'arrow',
+      from: onCircle(centre, flange, degrees),
+      to: onCircle(centre, flange + 40, degrees),
+      tone: 'ink',
+      heavy: true,
+    },
     ...(input.direction
       ? [
           {
             kind: 'label' as const,
             at: { x: at.x > centre.x + 60 ? width - 8 : Math.min(Math.max(at.x, 8), width - 8), y: besides(at) },
             text: input.direction,
-            anchor: at.x > centre.x + 60 ? ('end' as const) : at.x < centre.x - 60 ? ('start' as const) : ('middle' as const),
+            anchor:
+              at.x > centre.x + 60 ? ('end' as const) : at.x < centre.x - 60 ? ('start' as const) : ('middle' as const),
             size: 'normal' as const,
             tone: 'ink' as const,
           },
@@ -128,7 +143,14 @@ export const planView = (input: PlanViewInput): Drawing => {
     height,
     primitives: [
       ...beam(beamTop),
-      { kind: 'label', at: { x: 10, y: 17 }, text: { key: 'drawing.plan.substructure' }, anchor: 'start', size: 'small', tone: 'soft' },
+      {
+        kind: 'label',
+        at: { x: 10, y: 17 },
+        text: { key: 'drawing.plan.substructure' },
+        anchor: 'start',
+        size: 'small',
+        tone: 'soft',
+      },
       ...beam(height - 18),
       { kind: 'circle', at: centre, radius: flange, line: 'thick', tone: 'ink', fill: 'metal' },
       { kind: 'circle', at: centre, radius: boltCircle, line: 'centre', tone: 'soft', fill: 'none' },
@@ -157,7 +179,12 @@ export const planView = (input: PlanViewInput): Drawing => {
           ]),
       ...(input.rotationDeg === null
         ? []
-        : [{ key: 'drawing.plan.rotation', params: { rotation: { quantity: toDecimal(Math.abs(input.rotationDeg), 2), unit: 'deg' } } }]),
+        : [
+            {
+              key: 'drawing.plan.rotation',
+              params: { rotation: { quantity: toDecimal(Math.abs(input.rotationDeg), 2), unit: 'deg' } },
+            },
+          ]),
     ],
   };
 };

@@ -6,7 +6,8 @@ export type LineKind = 'thick' | 'thin' | 'dashed' | 'centre' | 'dotted';
 export type Tone = 'ink' | 'soft' | 'hairline' | 'straw' | 'purple' | 'blue' | 'oxide' | 'within';
 
 /** A number to be printed in the reader's own units, or a sentence, or words that are the same in every language. */
-export type Label = { amount: string; unit: string; /** without the unit: it stands beside the drawing */ bare?: true } | Text | string;
+export type Label =
+  { amount: string; unit: string; /** without the unit: it stands beside the drawing */ bare?: true } | Text | string;
 
 export interface Point {
   x: number;
@@ -20,7 +21,15 @@ export type Primitive =
   | { kind: 'hatch'; x: number; y: number; width: number; height: number; tone: Tone }
   | { kind: 'arrow'; from: Point; to: Point; tone: Tone; heavy: boolean }
   | { kind: 'dimension'; from: Point; to: Point; label: Label; tone: Tone }
-  | { kind: 'label'; at: Point; text: Label; anchor: 'start' | 'middle' | 'end'; size: 'small' | 'normal' | 'large'; tone: Tone; name?: string };
+  | {
+      kind: 'label';
+      at: Point;
+      text: Label;
+      anchor: 'start' | 'middle' | 'end';
+      size: 'small' | 'normal' | 'large';
+      tone: Tone;
+      name?: string;
+    };
 
 /** A drawing before it is rendered: the same primitives make the screen and the printed page. Units of the view box. */
 export interface Drawing {

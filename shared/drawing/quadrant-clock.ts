@@ -22,7 +22,10 @@ const centre: Point = { x: 180, y: 102 };
 const radius = 62;
 
 /** Where number and clock hour stand, so that they never touch the circle or each other. */
-const places: Record<Quarter, { hour: Point; value: Point; anchor: 'start' | 'middle' | 'end'; hourAnchor: 'start' | 'middle' | 'end' }> = {
+const places: Record<
+  Quarter,
+  { hour: Point; value: Point; anchor: 'start' | 'middle' | 'end'; hourAnchor: 'start' | 'middle' | 'end' }
+> = {
   '12': { hour: { x: 180, y: 13 }, value: { x: 180, y: 33 }, anchor: 'middle', hourAnchor: 'middle' },
   '3': { hour: { x: 256, y: 90 }, value: { x: 256, y: 112 }, anchor: 'start', hourAnchor: 'start' },
   '6': { hour: { x: 140, y: 190 }, value: { x: 180, y: 190 }, anchor: 'middle', hourAnchor: 'end' },
@@ -89,7 +92,12 @@ export const quadrantClock = ({ values, unit, lowSideDegrees, outside = [] }: Qu
       ),
       ...(lowSideDegrees === null
         ? []
-        : [{ key: 'drawing.clock.low-side-at', params: { degrees: { quantity: toDecimal(lowSideDegrees, 0), unit: 'deg' } } }]),
+        : [
+            {
+              key: 'drawing.clock.low-side-at',
+              params: { degrees: { quantity: toDecimal(lowSideDegrees, 0), unit: 'deg' } },
+            },
+          ]),
     ],
   };
 };

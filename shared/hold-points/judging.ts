@@ -59,7 +59,10 @@ export const judgeRange = (
   const { measured, min, max, unit } = frame;
   if (measured === undefined || !Number.isFinite(measured)) return [];
   const low = min !== undefined && measured < min - slack ? min - measured : null;
-  const high = max !== undefined && (frame.exclusiveMax ? measured >= max - slack : measured > max + slack) ? measured - max : null;
+  const high =
+    max !== undefined && (frame.exclusiveMax ? measured >= max - slack : measured > max + slack)
+      ? measured - max
+      : null;
   const by = low ?? high;
   const outcome = by === null ? 'within' : 'outside';
   const difference: TextParam = { quantity: toDecimal(Math.max(by ?? 0, 0)), unit, difference: true };

@@ -112,11 +112,7 @@ const judgeBeforeLift = (context: PointContext): Verdict[] => {
 export const sealGreasedAndChecked: PointDefinition = {
   kind: 'seal-greased-and-checked',
   version: 1,
-  order: [
-    read(/^(direction|seal\.(part|condition|sound)|grease)/),
-    shot('seal-before'),
-    act('set-head'),
-  ],
+  order: [read(/^(direction|seal\.(part|condition|sound)|grease)/), shot('seal-before'), act('set-head')],
   groups: (context) => [
     { key: 'direction', fields: [check('direction-marked')] },
     ...(hasSeal(context) ? sealGroups(context) : []),

@@ -191,5 +191,7 @@ export const judgeBeforeTest = (context: PointContext): Verdict[] => [
   ...judgeTarget(context),
   ...mustBeDone(context, 'port-probed'),
   ...mustBeDone(context, 'fitting-in'),
-  ...(isNitrogen(context) ? [...judgeDistanceKnown(context), ...mustBeDone(context, 'exclusion', 'exclusion-nitrogen')] : []),
+  ...(isNitrogen(context)
+    ? [...judgeDistanceKnown(context), ...mustBeDone(context, 'exclusion', 'exclusion-nitrogen')]
+    : []),
 ];

@@ -29,7 +29,12 @@ export interface Verdict {
   /** ids of the readings it rests on: a concession binds them, a new reading voids it */
   basis: string[];
   measured: Amount | null;
-  allowed: { min: string | null; max: string | null; /** the highest value itself is already outside */ below?: true; unit: string } | null;
+  allowed: {
+    min: string | null;
+    max: string | null;
+    /** the highest value itself is already outside */ below?: true;
+    unit: string;
+  } | null;
   /** by how much it is outside */
   by: Amount | null;
   source: Source;

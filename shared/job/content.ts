@@ -4,7 +4,6 @@ import type { HashText } from '../ledger/chain';
 import type { JobState, PointState } from './state';
 import { reviewPoint, standingPhotos, type PointReview } from './review';
 
-
 const readingsOf = (review: PointReview) =>
   review.fields.flatMap((field) => {
     const reading = review.context.read(field.key);
@@ -41,7 +40,11 @@ export const contentOf = (state: JobState, point: PointState, shown: Shown) => {
     direction: state.direction ? { direction: state.direction.direction, words: state.direction.words } : null,
     readings: readingsOf(review),
     photos: standingPhotos(point.photos).map(({ shot, sha256, previewSha256 }) => ({ shot, sha256, previewSha256 })),
-    acts: point.acts.map((run) => ({ act: run.act, begun: run.begun.at.corrected, ended: run.ended?.at.corrected ?? null })),
+    acts: point.acts.map((run) => ({
+      act: run.act,
+      begun: run.begun.at.corrected,
+      ended: run.ended?.at.corrected ?? null,
+    })),
     computed: review.computed,
     verdicts: review.verdicts,
     concessions: review.conceded.map(({ limit, basis, reason }) => ({ limit, basis, reason })),

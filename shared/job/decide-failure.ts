@@ -108,12 +108,16 @@ export const decideSeal: Decider<'seal'> = (input) => {
   const { state, command } = input;
   if (state.stopped) return refuse('work-stopped', { since: state.stopped });
   const waiting = state.points.filter((point) => counts(point) && point.status !== 'released');
-  if (waiting.length > 0) return refuse('not-all-released', { missing: waiting.map((point) => `point:${point.place.id}`) });
+  if (waiting.length > 0)
+    return refuse('not-all-released', { missing: waiting.map((point) => `point:${point.place.id}`) });
   if (command.body.concessions !== concessionTotal(state))
     return refuse('concessions-miscounted', { params: { total: concessionTotal(state) } });
   const moved = jobContentMoved(input, command.body);
   if (moved) return moved;
   return accept(
-    event(input, 'job-sealed', { concessions: command.body.concessions, signature: signature(input, 'seal', command.body) }),
+    event(input, 'job-sealed', {
+      concessions: command.body.concessions,
+      signature: signature(input, 'seal', command.body),
+    }),
   );
 };

@@ -33,10 +33,9 @@ const inUse = (state: JobState, terms: Terms): string[] => {
     ...(['datum', 'targetHeightIn', 'standOffIn'] as const).filter((name) => old[name] !== terms[name]),
     ...(JSON.stringify(old.test) === JSON.stringify(terms.test) ? [] : ['test' as const]),
   ];
-  return [
-    ...moved,
-    ...changedSettings(old, terms).filter((name) => !onlyStricter(name, old, terms)),
-  ].filter((name) => releasedBy(state, name).length > 0);
+  return [...moved, ...changedSettings(old, terms).filter((name) => !onlyStricter(name, old, terms))].filter(
+    (name) => releasedBy(state, name).length > 0,
+  );
 };
 
 /** Before point 1 is released the coordinator may still mend the plan; after that it takes the representative's signature. */

@@ -22,7 +22,8 @@ const isDecision = (standing: Standing): standing is Decision => 'ok' in standin
 
 /** A reading captured before presenting that arrives later is kept: it withdraws, or stands flagged as late. */
 const standingOf = (point: PointState, correctedAt: string): Standing => {
-  const before = (time: string | undefined): boolean => time !== undefined && Date.parse(correctedAt) < Date.parse(time);
+  const before = (time: string | undefined): boolean =>
+    time !== undefined && Date.parse(correctedAt) < Date.parse(time);
   switch (point.status) {
     case 'open':
       return { late: false, withdraws: false };
@@ -66,7 +67,10 @@ const measurerOf = ({ state, stamp }: Deciding<'record'>, named: PersonRef | nul
 };
 
 /** Understands every entry or says at the first that is not, which one and why. */
-const readEntries = (input: Deciding<'record'>, find: (key: string) => FieldDefinition | undefined): Read[] | Decision => {
+const readEntries = (
+  input: Deciding<'record'>,
+  find: (key: string) => FieldDefinition | undefined,
+): Read[] | Decision => {
   const read: Read[] = [];
   for (const entry of input.command.body.entries) {
     const field = find(entry.field);
@@ -120,7 +124,9 @@ const recordAtSite = (input: Deciding<'record'>): Decision => {
   const groups = siteGroups();
   const read = readEntries(input, (key) => fieldOf({ groups }, key));
   if (!Array.isArray(read)) return read;
-  return accept(event(input, 'readings-recorded', { point: sitePoint, entries: toEntries(input.command.id, read), late: false }));
+  return accept(
+    event(input, 'readings-recorded', { point: sitePoint, entries: toEntries(input.command.id, read), late: false }),
+  );
 };
 
 export const decideRecord: Decider<'record'> = (input) => {
@@ -134,7 +140,10 @@ export const decideRecord: Decider<'record'> = (input) => {
   if (read.every(({ field }) => field.site)) return recordAtSite(input);
   const standing = settingOver(state, at) ?? standingOf(point, at.corrected);
   if (isDecision(standing)) return standing;
-  const struck = strikeOver(point, read.map(({ field }) => field.key));
+  const struck = strikeOver(
+    point,
+    read.map(({ field }) => field.key),
+  );
   if (struck) return refuse('row-struck', { since: struck });
   const wrongHand = secondHandWrong(read, review.fields, (field) => review.context.read(field)?.measuredBy);
   if (wrongHand) return wrongHand;
@@ -152,7 +161,8 @@ export const decideAddPhoto: Decider<'add-photo'> = (input) => {
   const point = pointNamed(state, id);
   if (!point) return refuse('no-such-point');
   const review = reviewPoint(state, point);
-  if (!review.shots.some((shot) => shot.key === rest.shot)) return refuse('no-such-shot', { params: { shot: rest.shot } });
+  if (!review.shots.some((shot) => shot.key === rest.shot))
+    return refuse('no-such-shot', { params: { shot: rest.shot } });
   const standing = settingOver(state, at) ?? standingOf(point, at.corrected);
   if (isDecision(standing)) return standing;
   const added = event(input, 'photo-added', { point: id, photo: command.id, ...rest, takenAt, late: standing.late });
@@ -170,7 +180,13 @@ export const decideSetPhotoAside: Decider<'set-photo-aside'> = (input) => {
 
 /** Without a sure time nobody knows how old the air is: a stop for fire; every other act is held by its times later. */
 const judgeActClock = (context: PointContext, flame: boolean): Verdict[] =>
-  judgeFact(context, { limit: 'act-clock', kind: flame ? 'stop' : 'advice', about: [], source: commonPractice, holds: false });
+  judgeFact(context, {
+    limit: 'act-clock',
+    kind: flame ? 'stop' : 'advice',
+    about: [],
+    source: commonPractice,
+    holds: false,
+  });
 
 /**
  * What would be judged if this act began at `at` (ISO): the screen asks the same before the tap. Null where the point

@@ -1,6 +1,16 @@
 import { ownerOf } from '../hold-points/points';
 import { samePerson } from './actor';
-import { accept, contentMoved, event, pointNamed, refuse, signature, type Decider, type Decision, type JobActor } from './decision';
+import {
+  accept,
+  contentMoved,
+  event,
+  pointNamed,
+  refuse,
+  signature,
+  type Decider,
+  type Decision,
+  type JobActor,
+} from './decision';
 import type { AsJudged, JobEventOf } from './events';
 import { runningAct } from './points';
 import { covers, reviewPoint, standingPhotos, type PointReview } from './review';
@@ -24,8 +34,11 @@ export const handsIn = (review: PointReview, point: PointState) => [
 ];
 
 /** Whether somebody's own hand is in the evidence: such a person releases and concedes nothing here. */
-export const handIsIn = (review: PointReview, point: PointState, actor: Pick<JobActor, 'accountId' | 'name'>): boolean =>
-  handsIn(review, point).some((hand) => samePerson(hand, actor));
+export const handIsIn = (
+  review: PointReview,
+  point: PointState,
+  actor: Pick<JobActor, 'accountId' | 'name'>,
+): boolean => handsIn(review, point).some((hand) => samePerson(hand, actor));
 
 /** The point must be presented; if not, the loser of a race hears who was faster. */
 const notPresented = (point: PointState): Decision | null => {
@@ -82,7 +95,11 @@ export const decideSendBack: Decider<'send-back'> = (input) => {
   if (early) return early;
   if (point.presentation?.contentHash !== contentHash) return refuse('content-changed', { since: point.presentation });
   return accept(
-    event({ ...input, stamp: { ...input.stamp, role: ownerOf[point.place.kind] } }, 'point-sent-back', { point: id, reason, contentHash }),
+    event({ ...input, stamp: { ...input.stamp, role: ownerOf[point.place.kind] } }, 'point-sent-back', {
+      point: id,
+      reason,
+      contentHash,
+    }),
   );
 };
 
@@ -98,15 +115,21 @@ export const decideConcede: Decider<'concede'> = (input) => {
   const items: JobEventOf<'reading-conceded'>['body']['items'] = [];
   for (const item of command.body.items) {
     const verdict = review.verdicts.find((one) => one.limit === item.limit);
-    if (verdict?.outcome === 'outside' && verdict.kind === 'stop') return refuse('cannot-concede-stop', { blockers: [verdict] });
+    if (verdict?.outcome === 'outside' && verdict.kind === 'stop')
+      return refuse('cannot-concede-stop', { blockers: [verdict] });
     const hold = review.unconceded.find((one) => one.limit === item.limit);
     if (!hold) return refuse('nothing-to-concede', { params: { limit: item.limit } });
     if (!covers({ ...item, verdict: hold }, hold)) return refuse('verdict-moved', { blockers: [hold] });
-    if (items.some((one) => one.limit === item.limit)) return refuse('nothing-to-concede', { params: { limit: item.limit } });
+    if (items.some((one) => one.limit === item.limit))
+      return refuse('nothing-to-concede', { params: { limit: item.limit } });
     items.push({ limit: item.limit, basis: hold.basis, reason: item.reason, verdict: hold });
   }
   return accept(
-    event(input, 'reading-conceded', { point: point.place.id, items, signature: signature(input, 'concede', command.body) }),
+    event(input, 'reading-conceded', {
+      point: point.place.id,
+      items,
+      signature: signature(input, 'concede', command.body),
+    }),
   );
 };
 

@@ -4,9 +4,23 @@ import type { HashText } from '../ledger/chain';
 import { commandGrants } from '../permissions/commands';
 import type { Times } from './actor';
 import { accept, event, refuse, type Decider, type Decision, type Deciding, type JobActor } from './decision';
-import { decideCallOff, decideOpenRepairRound, decideResumeWork, decideSeal, decideSetAgain, decideStopWork } from './decide-failure';
+import {
+  decideCallOff,
+  decideOpenRepairRound,
+  decideResumeWork,
+  decideSeal,
+  decideSetAgain,
+  decideStopWork,
+} from './decide-failure';
 import { decideAddInstrument } from './decide-instrument';
-import { decideAssignPerson, decideChangeTerms, decideHandOver, decideNameDirection, decideProposeDirection, decideRemovePerson } from './decide-people';
+import {
+  decideAssignPerson,
+  decideChangeTerms,
+  decideHandOver,
+  decideNameDirection,
+  decideProposeDirection,
+  decideRemovePerson,
+} from './decide-people';
 import { decidePresent, decideWithdraw } from './decide-present';
 import { decideAddPhoto, decideBeginAct, decideEndAct, decideRecord, decideSetPhotoAside } from './decide-record';
 import { decideStrikeRow } from './decide-strike';
@@ -50,14 +64,25 @@ const planJob = (command: CommandOf<'plan-job'>, actor: JobActor, at: Times): De
   const unworkable = planRefused(plan, at);
   if (unworkable) return unworkable;
   const stamp = { accountId: actor.accountId, name: actor.name, role: 'coordinator' as const };
-  return accept(event({ stamp, at, command }, 'job-planned', { plan: { ...plan, terms: withTrueSources(plan.terms) }, definitions: definitionsVersion }));
+  return accept(
+    event({ stamp, at, command }, 'job-planned', {
+      plan: { ...plan, terms: withTrueSources(plan.terms) },
+      definitions: definitionsVersion,
+    }),
+  );
 };
 
 /**
  * The one place where a command becomes events or a refusal. Pure: the phone asks it for the verdict at once, the
  * server asks it again under the row lock. `at` holds the three times; ages are judged by the corrected one.
  */
-export const decide = (state: JobState | null, command: Command, actor: JobActor, at: Times, hash: HashText): Decision => {
+export const decide = (
+  state: JobState | null,
+  command: Command,
+  actor: JobActor,
+  at: Times,
+  hash: HashText,
+): Decision => {
   if (command.type === 'plan-job') return state ? refuse('already-planned') : planJob(command, actor, at);
   if (!state || state.ended) return refuse('not-running', { since: state?.ended ?? null });
   const role = commandGrants[command.type].find((one) => actor.roles.includes(one));

@@ -45,7 +45,11 @@ export const event = <T extends JobEventType>(
   type: T,
   body: Omit<JobEventOf<T>['body'], keyof EventFrame>,
 ): JobEvent =>
-  ({ type, schema: 1, body: { ...body, actor: frame.stamp, at: frame.at, commandId: frame.command.id } }) as unknown as JobEvent;
+  ({
+    type,
+    schema: 1,
+    body: { ...body, actor: frame.stamp, at: frame.at, commandId: frame.command.id },
+  }) as unknown as JobEvent;
 
 /** The signature of this actor for a meaning, bound to the content's hash. */
 export const signature = (input: Framed, meaning: string, body: { contentHash: string; shown: Shown }): Signature => ({
@@ -78,7 +82,9 @@ export const lastChangeOf = (state: JobState, point: PointState): { by: ActorSta
     ...Object.values(point.readings)
       .flat()
       .flatMap((one) => [{ by: one.typedBy, at: one.at }, ...(one.struck ? [one.struck] : [])]),
-    ...Object.values(state.site).flat().map((one) => ({ by: one.typedBy, at: one.at })),
+    ...Object.values(state.site)
+      .flat()
+      .map((one) => ({ by: one.typedBy, at: one.at })),
     ...point.photos.flatMap((one) => (one.setAside ? [one, one.setAside] : [one])),
     ...point.concessions,
     ...point.acts.flatMap((run) => (run.ended ? [run.begun, run.ended] : [run.begun])),

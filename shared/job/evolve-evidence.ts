@@ -25,7 +25,9 @@ const takeCustody = (custody: Custody[], readings: Reading[]): Custody[] =>
         case 'holder':
           return { ...item, holder: value };
         default:
-          return value === 'same' || value === 'replaced' ? { ...item, back: value, out: false } : { ...item, back: null };
+          return value === 'same' || value === 'replaced'
+            ? { ...item, back: value, out: false }
+            : { ...item, back: null };
       }
     };
     return all.map((item) => (item.port === Number(match[1]) ? change(item) : item));
@@ -69,7 +71,19 @@ export const evolveEvidence = (state: JobState, event: JobEvent): JobState => {
       return rowStruck(state, event);
     case 'photo-added': {
       const { photo, shot, sha256, previewSha256, width, height, takenAt, late, actor, at, point } = event.body;
-      const added = { id: photo, shot, sha256, previewSha256, width, height, takenAt, late, by: actor, at, setAside: null };
+      const added = {
+        id: photo,
+        shot,
+        sha256,
+        previewSha256,
+        width,
+        height,
+        takenAt,
+        late,
+        by: actor,
+        at,
+        setAside: null,
+      };
       return changePoint(state, point, (one) => ({ ...one, photos: [...one.photos, added] }));
     }
     case 'photo-set-aside': {
@@ -89,7 +103,9 @@ export const evolveEvidence = (state: JobState, event: JobEvent): JobState => {
       const { act, actor, at, point } = event.body;
       return changePoint(state, point, (one) => ({
         ...one,
-        acts: one.acts.map((run) => (run.act === act && run.ended === null ? { ...run, ended: { by: actor, at } } : run)),
+        acts: one.acts.map((run) =>
+          run.act === act && run.ended === null ? { ...run, ended: { by: actor, at } } : run,
+        ),
       }));
     }
     case 'reading-conceded': {

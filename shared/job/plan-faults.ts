@@ -70,23 +70,62 @@ const headFaults = ({ head, casing, procedure }: JobPlan): Verdict[] => {
   const faults: Verdict[] = [];
   if (Number(head.casingOdIn) !== Number(casing.odIn))
     faults.push(
-      fault({ limit: 'head-for-other-casing', kind: 'stop', about: ['headId', 'casing'], source: drawing, params: { head: inches(head.casingOdIn), casing: inches(casing.odIn) } }),
+      fault({
+        limit: 'head-for-other-casing',
+        kind: 'stop',
+        about: ['headId', 'casing'],
+        source: drawing,
+        params: { head: inches(head.casingOdIn), casing: inches(casing.odIn) },
+      }),
     );
   const tolerance = odTolerance({ nominalOdIn: Number(casing.odIn), measuredOdIn: Number(casing.odIn) });
-  if (tolerance.ok && Number(head.casingOdIn) === Number(casing.odIn) && Number(head.socketBoreIn) < tolerance.largestIn)
+  if (
+    tolerance.ok &&
+    Number(head.casingOdIn) === Number(casing.odIn) &&
+    Number(head.socketBoreIn) < tolerance.largestIn
+  )
     faults.push(
-      fault({ limit: 'socket-tight', kind: 'advice', about: ['headId'], source: standard('API 5CT'), params: { bore: inches(head.socketBoreIn), largest: inches(tolerance.largestIn) } }),
+      fault({
+        limit: 'socket-tight',
+        kind: 'advice',
+        about: ['headId'],
+        source: standard('API 5CT'),
+        params: { bore: inches(head.socketBoreIn), largest: inches(tolerance.largestIn) },
+      }),
     );
   if (head.seals !== head.sealAboveBaseIn.length)
-    faults.push(fault({ limit: 'seals-miscounted', kind: 'stop', about: ['headId'], source: drawing, params: { seals: head.seals } }));
+    faults.push(
+      fault({
+        limit: 'seals-miscounted',
+        kind: 'stop',
+        about: ['headId'],
+        source: drawing,
+        params: { seals: head.seals },
+      }),
+    );
   if (!flangeOf({ size: head.nominalSize, ratedPsi: head.ratedPressurePsi }).ok)
     faults.push(
-      fault({ limit: 'flange-unknown', kind: 'advice', about: ['headId'], source: standard('API 6A'), params: { size: head.nominalSize, rating: psi(head.ratedPressurePsi), known: ratingsOf(head.nominalSize).join(', ') || '–' } }),
+      fault({
+        limit: 'flange-unknown',
+        kind: 'advice',
+        about: ['headId'],
+        source: standard('API 6A'),
+        params: {
+          size: head.nominalSize,
+          rating: psi(head.ratedPressurePsi),
+          known: ratingsOf(head.nominalSize).join(', ') || '–',
+        },
+      }),
     );
   const inside = procedure.passes.some((pass) => pass.weld === 'inside');
   if (inside !== (head.welds === 'outside-and-inside'))
     faults.push(
-      fault({ limit: inside ? 'inside-pass-without-weld' : 'inside-weld-without-pass', kind: 'stop', about: ['procedureId', 'headId'], source: { kind: 'procedure', ref: procedure.number } }),
+      fault({
+        limit: inside ? 'inside-pass-without-weld' : 'inside-weld-without-pass',
+        kind: 'stop',
+        about: ['procedureId', 'headId'],
+        source: { kind: 'procedure', ref: procedure.number },
+      }),
     );
   return faults;
 };
@@ -96,11 +135,13 @@ const needed: readonly Role[] = ['welder', 'company_rep', 'tool_pusher'];
 const crewFaults = ({ people, procedure }: JobPlan, day: string): Verdict[] => {
   const processes = [...new Set(procedure.passes.map((pass) => pass.process))];
   const qualified = (process: string): boolean =>
-    people.some(({ role, qualifications }) =>
-      role === 'welder' && qualifications.some((one) => {
-        const continuity = qualificationContinuity({ lastUsed: one.lastUsed, onDay: day });
-        return one.process === process && continuity.ok && continuity.inForce;
-      }),
+    people.some(
+      ({ role, qualifications }) =>
+        role === 'welder' &&
+        qualifications.some((one) => {
+          const continuity = qualificationContinuity({ lastUsed: one.lastUsed, onDay: day });
+          return one.process === process && continuity.ok && continuity.inForce;
+        }),
     );
   const bothSides = people.filter(
     (person, index) =>
@@ -108,13 +149,30 @@ const crewFaults = ({ people, procedure }: JobPlan, day: string): Verdict[] => {
       onBothSides(people.filter((one) => one.accountId === person.accountId).map((one) => one.role)),
   );
   return [
-    ...bothSides.map(({ name }) => fault({ limit: 'on-both-sides', kind: 'stop', about: ['people'], source: commonPractice, params: { name } })),
+    ...bothSides.map(({ name }) =>
+      fault({ limit: 'on-both-sides', kind: 'stop', about: ['people'], source: commonPractice, params: { name } }),
+    ),
     ...needed
       .filter((role) => !people.some((person) => person.role === role))
-      .map((role) => fault({ limit: `nobody-is-${role.replace('_', '-')}`, kind: 'stop', about: ['people'], source: commonPractice })),
+      .map((role) =>
+        fault({
+          limit: `nobody-is-${role.replace('_', '-')}`,
+          kind: 'stop',
+          about: ['people'],
+          source: commonPractice,
+        }),
+      ),
     ...processes
       .filter((process) => !qualified(process))
-      .map((process) => fault({ limit: 'nobody-qualified', kind: 'hold', about: ['people'], source: standard('ASME IX QW-322'), params: { process } })),
+      .map((process) =>
+        fault({
+          limit: 'nobody-qualified',
+          kind: 'hold',
+          about: ['people'],
+          source: standard('ASME IX QW-322'),
+          params: { process },
+        }),
+      ),
   ];
 };
 
@@ -122,10 +180,21 @@ const instrumentFaults = ({ instruments }: JobPlan, day: string): Verdict[] => [
   ...instruments
     .filter((instrument) => instrument.calibratedUntil < day)
     .map((instrument) =>
-      fault({ limit: 'instrument-out-of-date', kind: 'hold', about: ['instrumentIds'], source: { kind: 'calibration', ref: instrument.serial }, params: { name: instrument.name, until: { day: instrument.calibratedUntil } } }),
+      fault({
+        limit: 'instrument-out-of-date',
+        kind: 'hold',
+        about: ['instrumentIds'],
+        source: { kind: 'calibration', ref: instrument.serial },
+        params: { name: instrument.name, until: { day: instrument.calibratedUntil } },
+      }),
     ),
   ...(['gas-meter', 'gauge'] as const)
-    .filter((kind) => !instruments.some((instrument) => instrument.kind === kind || (kind === 'gauge' && instrument.kind === 'recorder')))
+    .filter(
+      (kind) =>
+        !instruments.some(
+          (instrument) => instrument.kind === kind || (kind === 'gauge' && instrument.kind === 'recorder'),
+        ),
+    )
     .map((kind) => fault({ limit: `no-${kind}`, kind: 'stop', about: ['instrumentIds'], source: commonPractice })),
 ];
 

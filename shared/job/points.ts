@@ -39,11 +39,10 @@ export const openNext = (points: PointState[], at: Times): PointState[] => {
 export const findPoint = (state: JobState, id: string): PointState | undefined =>
   state.points.find((point) => point.place.id === id);
 
-export const changePoint = (
-  state: JobState,
-  id: string,
-  change: (point: PointState) => PointState,
-): JobState => ({ ...state, points: state.points.map((point) => (point.place.id === id ? change(point) : point)) });
+export const changePoint = (state: JobState, id: string, change: (point: PointState) => PointState): JobState => ({
+  ...state,
+  points: state.points.map((point) => (point.place.id === id ? change(point) : point)),
+});
 
 /** The point that is open or presented now; undefined when all are released. */
 export const currentPoint = (state: JobState): PointState | undefined =>

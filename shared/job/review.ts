@@ -50,8 +50,16 @@ const placeFields = (context: PointContext, groups: GroupDefinition[]): PlacedFi
 
 const standing = (photos: Photo[]): Photo[] => photos.filter((photo) => photo.setAside === null && !photo.late);
 
-const missingOf = (point: PointState, context: PointContext, fields: PlacedField[], shots: ShotDefinition[], acts: ActDefinition[]): string[] => [
-  ...fields.filter((field) => field.required && context.read(field.key) === undefined).map((field) => `field:${field.key}`),
+const missingOf = (
+  point: PointState,
+  context: PointContext,
+  fields: PlacedField[],
+  shots: ShotDefinition[],
+  acts: ActDefinition[],
+): string[] => [
+  ...fields
+    .filter((field) => field.required && context.read(field.key) === undefined)
+    .map((field) => `field:${field.key}`),
   ...acts
     .filter((act) => act.required && !point.acts.some((run) => run.act === act.key && run.ended))
     .map((act) => `act:${act.key}`),
@@ -108,7 +116,10 @@ export const reviewPoint = (state: JobState, point: PointState): PointReview => 
 };
 
 /** The definition of one field of a point, rows included; undefined when the point has no such field. */
-export const fieldOf = (review: Pick<PointReview, 'groups'>, key: string): (FieldDefinition & { group: string }) | undefined => {
+export const fieldOf = (
+  review: Pick<PointReview, 'groups'>,
+  key: string,
+): (FieldDefinition & { group: string }) | undefined => {
   const template = templateKey(key);
   for (const group of review.groups) {
     const row = /\.(\d+)\./.exec(key)?.[1];

@@ -32,9 +32,13 @@ export const understand = (field: FieldDefinition, typed: string, unitTyped: str
     case 'quantity':
       return understandQuantity(typed, unitTyped, of.unit);
     case 'count':
-      return /^\d{1,4}$/.test(trimmed) ? { ok: true, value: String(Number(trimmed)) } : { ok: false, reason: 'count-not-whole' };
+      return /^\d{1,4}$/.test(trimmed)
+        ? { ok: true, value: String(Number(trimmed)) }
+        : { ok: false, reason: 'count-not-whole' };
     case 'check':
-      return trimmed === 'yes' || trimmed === 'no' ? { ok: true, value: trimmed } : { ok: false, reason: 'check-yes-or-no' };
+      return trimmed === 'yes' || trimmed === 'no'
+        ? { ok: true, value: trimmed }
+        : { ok: false, reason: 'check-yes-or-no' };
     case 'choice':
       return of.choices.includes(trimmed) ? { ok: true, value: trimmed } : { ok: false, reason: 'choice-not-offered' };
     case 'time':

@@ -1,11 +1,6 @@
 /** What the record may hold: no floats, no dates, nothing that prints differently on another machine. */
 export type CanonicalValue =
-  | null
-  | boolean
-  | number
-  | string
-  | readonly CanonicalValue[]
-  | { readonly [key: string]: CanonicalValue | undefined };
+  null | boolean | number | string | readonly CanonicalValue[] | { readonly [key: string]: CanonicalValue | undefined };
 
 const byCodeUnits = (a: string, b: string): number => (a < b ? -1 : a > b ? 1 : 0);
 

@@ -60,7 +60,13 @@ export class TestJob {
   command<T extends CommandType>(type: T, body: CommandOf<T>['body']): Command {
     const at = new Date(this.now).toISOString();
     const id = idNumber(this.ids++);
-    return { id, type, basedOn: this.events.length, clock: { deviceAt: at, offsetMs: 0, doubtMs: 200 }, body } as Command;
+    return {
+      id,
+      type,
+      basedOn: this.events.length,
+      clock: { deviceAt: at, offsetMs: 0, doubtMs: 200 },
+      body,
+    } as Command;
   }
 
   /** Decides and, when accepted, applies. */

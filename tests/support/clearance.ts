@@ -2,7 +2,12 @@ import type { RecordEntry } from '../../shared/contracts/commands';
 import { gasPlaces } from '../../shared/hold-points/gas';
 import { idNumber, type TestJob } from './a-job';
 
-const entry = (field: string, typed: string, unit: string | null = null): RecordEntry => ({ field, typed, unit, measuredBy: null });
+const entry = (field: string, typed: string, unit: string | null = null): RecordEntry => ({
+  field,
+  typed,
+  unit,
+  measuredBy: null,
+});
 
 /** Clean air at all three places. */
 export const cleanAir = (own: Record<string, string> = {}): RecordEntry[] =>

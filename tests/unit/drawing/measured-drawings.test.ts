@@ -4,8 +4,10 @@ import { planView, type PlanViewInput } from '../../../shared/drawing/plan-view'
 import type { Drawing, Primitive } from '../../../shared/drawing/primitives';
 import { quadrantClock } from '../../../shared/drawing/quadrant-clock';
 
-const labels = (drawing: Drawing) => drawing.primitives.filter((one): one is Extract<Primitive, { kind: 'label' }> => one.kind === 'label');
-const arrows = (drawing: Drawing) => drawing.primitives.filter((one): one is Extract<Primitive, { kind: 'arrow' }> => one.kind === 'arrow');
+const labels = (drawing: Drawing) =>
+  drawing.primitives.filter((one): one is Extract<Primitive, { kind: 'label' }> => one.kind === 'label');
+const arrows = (drawing: Drawing) =>
+  drawing.primitives.filter((one): one is Extract<Primitive, { kind: 'arrow' }> => one.kind === 'arrow');
 
 describe('the quadrant clock', () => {
   const values = { '12': 8.0625, '3': 8.125, '6': 8.1875, '9': 8.0625 };
@@ -13,7 +15,10 @@ describe('the quadrant clock', () => {
   it('writes every reading at its hour and says the same numbers in words', () => {
     const drawing = quadrantClock({ values, unit: 'in', lowSideDegrees: null });
     for (const [hour, value] of Object.entries(values)) {
-      expect(labels(drawing).find((one) => one.name === hour)?.text).toMatchObject({ amount: String(value), unit: 'in' });
+      expect(labels(drawing).find((one) => one.name === hour)?.text).toMatchObject({
+        amount: String(value),
+        unit: 'in',
+      });
       expect(drawing.alternative).toContainEqual({
         key: 'drawing.clock.reads',
         params: { quarter: hour, value: { quantity: String(value), unit: 'in' } },
@@ -33,7 +38,8 @@ describe('the quadrant clock', () => {
       fc.property(fc.double({ min: -720, max: 720, noNaN: true }), (degrees) => {
         const drawing = quadrantClock({ values, unit: 'in', lowSideDegrees: degrees });
         const words = labels(drawing).find((one) => one.tone === 'oxide')!;
-        for (const number of labels(drawing).filter((one) => one.name)) expect(Math.abs(number.at.y - words.at.y)).toBeGreaterThan(15);
+        for (const number of labels(drawing).filter((one) => one.name))
+          expect(Math.abs(number.at.y - words.at.y)).toBeGreaterThan(15);
         expect(words.at.x).toBeGreaterThan(60);
         expect(words.at.x).toBeLessThan(drawing.width - 60);
       }),
@@ -61,13 +67,15 @@ describe('the plan view', () => {
         expect(holes).toHaveLength(boltHoles);
         const centre = drawing.primitives.find((one) => one.kind === 'circle' && one.fill === 'metal');
         for (const hole of holes)
-          if (hole.kind === 'circle' && centre?.kind === 'circle') expect(Math.abs(hole.at.x - centre.at.x)).toBeGreaterThan(3);
+          if (hole.kind === 'circle' && centre?.kind === 'circle')
+            expect(Math.abs(hole.at.x - centre.at.x)).toBeGreaterThan(3);
       }),
     );
   });
 
   it('leans the way that the offsets say, and never so far that it misleads', () => {
-    const edge = (rotationDeg: number) => planView({ ...input, rotationDeg }).primitives.find((one) => one.kind === 'line' && one.tone === 'straw');
+    const edge = (rotationDeg: number) =>
+      planView({ ...input, rotationDeg }).primitives.find((one) => one.kind === 'line' && one.tone === 'straw');
     const drop = (rotationDeg: number) => {
       const line = edge(rotationDeg);
       return line?.kind === 'line' ? line.to.y - line.from.y : Number.NaN;
@@ -79,7 +87,13 @@ describe('the plan view', () => {
   });
 
   it('says in words which way the valve faces and what was measured', () => {
-    expect(planView(input).alternative.map((one) => one.key)).toEqual(['drawing.plan.faces', 'drawing.plan.offsets', 'drawing.plan.rotation']);
-    expect(planView({ ...input, direction: null, rotationDeg: null }).alternative[0]).toEqual({ key: 'drawing.plan.no-direction' });
+    expect(planView(input).alternative.map((one) => one.key)).toEqual([
+      'drawing.plan.faces',
+      'drawing.plan.offsets',
+      'drawing.plan.rotation',
+    ]);
+    expect(planView({ ...input, direction: null, rotationDeg: null }).alternative[0]).toEqual({
+      key: 'drawing.plan.no-direction',
+    });
   });
 });

@@ -90,7 +90,12 @@ describe('preheat reached', () => {
   });
 
   it('gives the advice of the steel only when its chemistry is known, and never blocks by it', () => {
-    const chemistry = { composition: carbonAlone('0.4225'), thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
+    const chemistry = {
+      composition: carbonAlone('0.4225'),
+      thicknessMm: '25.4',
+      hydrogenMl: '5',
+      heatInputKjPerMm: '1',
+    };
     const context = heated({}, aPlan({ procedure: { chemistry } }));
     expect(judged(context, 'preheat-advised')).toBe('advice outside');
     expect(Number(computedOf(context)['advice-preheat'])).toBeCloseTo(329.09, 1);
@@ -141,7 +146,12 @@ describe('preheat reached', () => {
   });
 
   it('has words for all that it shows', () => {
-    const chemistry = { composition: carbonAlone('0.4225'), thicknessMm: '25.4', hydrogenMl: '5', heatInputKjPerMm: '1' };
+    const chemistry = {
+      composition: carbonAlone('0.4225'),
+      thicknessMm: '25.4',
+      hydrogenMl: '5',
+      heatInputKjPerMm: '1',
+    };
     const context = aPointContext({
       kind,
       round: 1,

@@ -21,6 +21,9 @@ describe('a time that is typed', () => {
   it('is meant to lie ahead where a permit expires', () => {
     const job = aJob();
     recordPoint(job, 'hot-work-clearance', { 'permit.expires': later(job.now, 720) });
-    expect(job.try('present', { point: 'hot-work-clearance', ...job.signing('hot-work-clearance') }, job.person('welder')).ok).toBe(true);
+    expect(
+      job.try('present', { point: 'hot-work-clearance', ...job.signing('hot-work-clearance') }, job.person('welder'))
+        .ok,
+    ).toBe(true);
   });
 });

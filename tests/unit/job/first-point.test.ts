@@ -7,7 +7,11 @@ import { aPhoto, cleanAir, clearance, presentedClearance, statementsOfClearance 
 
 const point = 'hot-work-clearance';
 const released = (job: TestJob): TestJob =>
-  presentedClearance(job).do('release', { point, ...job.signing(point), statements: statementsOfClearance }, job.person('company_rep'));
+  presentedClearance(job).do(
+    'release',
+    { point, ...job.signing(point), statements: statementsOfClearance },
+    job.person('company_rep'),
+  );
 
 describe('a planned job', () => {
   it('stands with its first point open and everything after it shut', () => {
@@ -32,7 +36,10 @@ describe('a planned job', () => {
     const job = aJob();
     const entries = [{ field: 'gas.cellar.oxygen', typed: '20.9 psi', unit: 'pct', measuredBy: null }];
     const decision = job.try('record', { point, entries }, job.person('welder'));
-    expect(decision).toMatchObject({ ok: false, refusal: { code: 'not-understood', missing: ['field:gas.cellar.oxygen'] } });
+    expect(decision).toMatchObject({
+      ok: false,
+      refusal: { code: 'not-understood', missing: ['field:gas.cellar.oxygen'] },
+    });
   });
 });
 
@@ -105,7 +112,11 @@ describe('hot work clearance', () => {
 
   it('is released once: the loser hears who was faster and when', () => {
     const job = released(aJob());
-    const decision = job.try('release', { point, ...job.signing(point), statements: statementsOfClearance }, job.person('company_rep'));
+    const decision = job.try(
+      'release',
+      { point, ...job.signing(point), statements: statementsOfClearance },
+      job.person('company_rep'),
+    );
     expect(decision).toMatchObject({
       ok: false,
       refusal: { code: 'point-already-released', kind: 'conflict', since: { by: { name: 'O. Brandt' } } },
@@ -116,8 +127,15 @@ describe('hot work clearance', () => {
     const job = presentedClearance(aJob());
     const looked = job.signing(point);
     job.do('record', { point: 'site', entries: cleanAir({ 'gas.cellar.co': '9' }) }, job.person('welder'));
-    const decision = job.try('release', { point, ...looked, statements: statementsOfClearance }, job.person('company_rep'));
-    expect(decision).toMatchObject({ ok: false, refusal: { code: 'content-changed', since: { by: { name: 'W. Calder' } } } });
+    const decision = job.try(
+      'release',
+      { point, ...looked, statements: statementsOfClearance },
+      job.person('company_rep'),
+    );
+    expect(decision).toMatchObject({
+      ok: false,
+      refusal: { code: 'content-changed', since: { by: { name: 'W. Calder' } } },
+    });
   });
 
   it('keeps the air that it was released on when the air is read again later', () => {
@@ -162,9 +180,21 @@ describe('evidence that arrives late', () => {
 describe('reopening', () => {
   it('shuts every later point and keeps what was recorded there as superseded', () => {
     const job = released(aJob());
-    job.do('record', { point: 'height-takeoff', entries: [{ field: 'string.a', typed: '3', unit: 'in', measuredBy: null }] }, job.person('welder'));
-    job.do('reopen', { point, reason: 'The float was not looked at.', ...job.signing(point) }, job.person('company_rep'));
-    expect(job.point(point)).toMatchObject({ status: 'open', release: null, reopened: [{ reason: 'The float was not looked at.' }] });
+    job.do(
+      'record',
+      { point: 'height-takeoff', entries: [{ field: 'string.a', typed: '3', unit: 'in', measuredBy: null }] },
+      job.person('welder'),
+    );
+    job.do(
+      'reopen',
+      { point, reason: 'The float was not looked at.', ...job.signing(point) },
+      job.person('company_rep'),
+    );
+    expect(job.point(point)).toMatchObject({
+      status: 'open',
+      release: null,
+      reopened: [{ reason: 'The float was not looked at.' }],
+    });
     expect(job.point(point).superseded).toHaveLength(1);
     expect(job.point('height-takeoff')).toMatchObject({ status: 'shut', readings: {} });
     expect(job.point('height-takeoff').superseded[0]?.readings['string.a']).toHaveLength(1);

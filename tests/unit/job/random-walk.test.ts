@@ -65,7 +65,21 @@ const take = async (job: TestJob, { what, who, where, minutes }: Step): Promise<
       if (current?.status === 'open' && !job.job.stopped) tryTo(() => recordPoint(job, current.place.id));
       return;
     case 'record':
-      job.try('record', { point, entries: [{ field: review.fields[where % review.fields.length]?.key ?? 'x', typed: '8', unit: 'in', measuredBy: null }] }, actor);
+      job.try(
+        'record',
+        {
+          point,
+          entries: [
+            {
+              field: review.fields[where % review.fields.length]?.key ?? 'x',
+              typed: '8',
+              unit: 'in',
+              measuredBy: null,
+            },
+          ],
+        },
+        actor,
+      );
       return;
     case 'photo':
       job.try('add-photo', { point, ...aPhoto(review.shots[0]?.key ?? 'x', where + 1) }, actor);
@@ -87,7 +101,19 @@ const take = async (job: TestJob, { what, who, where, minutes }: Step): Promise<
       return;
     case 'concede': {
       const items = review.verdicts.slice(0, 3).map(({ limit, basis }) => ({ limit, basis, reason }));
-      if (items.length > 0) job.try('concede', { point, items: review.unconceded.length > 0 ? review.unconceded.map(({ limit, basis }) => ({ limit, basis, reason })) : items, ...job.signing(point) }, actor);
+      if (items.length > 0)
+        job.try(
+          'concede',
+          {
+            point,
+            items:
+              review.unconceded.length > 0
+                ? review.unconceded.map(({ limit, basis }) => ({ limit, basis, reason }))
+                : items,
+            ...job.signing(point),
+          },
+          actor,
+        );
       return;
     }
     case 'send-back':
@@ -121,16 +147,23 @@ const holds = (job: TestJob): void => {
   const live = job.job.points.filter((point) => point.carriedInto === null);
   const firstUnreleased = live.findIndex((point) => point.status !== 'released');
   live.forEach((point, index) => {
-    if (firstUnreleased >= 0 && index > firstUnreleased) expect(point.status, `${point.place.id} is ahead of its turn`).toBe('shut');
+    if (firstUnreleased >= 0 && index > firstUnreleased)
+      expect(point.status, `${point.place.id} is ahead of its turn`).toBe('shut');
   });
   expect(live.filter((point) => point.status === 'open' || point.status === 'presented').length).toBeLessThanOrEqual(1);
   for (const point of live.filter((one) => one.status === 'released')) {
     expect(point.release?.by.role, 'released by its owner').toBe(ownerOf[point.place.kind]);
     expect(handIsIn(reviewPoint(job.job, point), point, point.release!.by), 'released by another hand').toBe(false);
     const outside = point.release!.judged.verdicts.filter((verdict) => verdict.outcome === 'outside');
-    expect(outside.filter((verdict) => verdict.kind === 'stop'), 'no stop was released').toEqual([]);
+    expect(
+      outside.filter((verdict) => verdict.kind === 'stop'),
+      'no stop was released',
+    ).toEqual([]);
     for (const hold of outside.filter((verdict) => verdict.kind === 'hold'))
-      expect(point.concessions.some((one) => one.limit === hold.limit), `${hold.limit} was conceded`).toBe(true);
+      expect(
+        point.concessions.some((one) => one.limit === hold.limit),
+        `${hold.limit} was conceded`,
+      ).toBe(true);
   }
   if (job.job.status === 'sealed') expect(live.every((point) => point.status === 'released')).toBe(true);
 };
@@ -139,15 +172,19 @@ describe('whatever is sent to a job', () => {
   it('keeps order and ownership, and its events fold to the same job again', { timeout: 120_000 }, async () => {
     const starts = ['hot-work-clearance', 'final-cut', 'valve-orientation', 'pass-1-inspected', 'cooled-to-touch'];
     fc.assert(
-      fc.asyncProperty(fc.constantFrom(...starts), fc.array(step, { minLength: 5, maxLength: 30 }), async (start, steps) => {
-        const job = aJob();
-        walkTo(job, start);
-        for (const one of steps) {
-          take(job, one);
-          holds(job);
-        }
-        expect(canonicalJson(foldEvents(job.id, job.events))).toBe(canonicalJson(job.job));
-      }),
+      fc.asyncProperty(
+        fc.constantFrom(...starts),
+        fc.array(step, { minLength: 5, maxLength: 30 }),
+        async (start, steps) => {
+          const job = aJob();
+          walkTo(job, start);
+          for (const one of steps) {
+            take(job, one);
+            holds(job);
+          }
+          expect(canonicalJson(foldEvents(job.id, job.events))).toBe(canonicalJson(job.job));
+        },
+      ),
       { numRuns: 40 },
     );
   });

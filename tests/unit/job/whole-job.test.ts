@@ -22,8 +22,17 @@ describe('a whole job', () => {
   const inside = { ...aPlan().procedure.passes[0]!, weld: 'inside' as const };
   it.each<[string, PlanOverrides]>([
     ['one pass', { procedure: { passes: aPlan().procedure.passes.slice(0, 1) } }],
-    ['twelve passes', { procedure: { passes: Array.from({ length: 12 }, (_, n) => aPlan().procedure.passes[n % 4]!) } }],
-    ['no seal', { head: { seals: 0, sealAboveBaseIn: [], sealRatedPsi: null, sealRatedF: null, welds: 'outside-and-inside' }, procedure: { passes: [...aPlan().procedure.passes, inside], insideLegIn: '0.25' } }],
+    [
+      'twelve passes',
+      { procedure: { passes: Array.from({ length: 12 }, (_, n) => aPlan().procedure.passes[n % 4]!) } },
+    ],
+    [
+      'no seal',
+      {
+        head: { seals: 0, sealAboveBaseIn: [], sealRatedPsi: null, sealRatedF: null, welds: 'outside-and-inside' },
+        procedure: { passes: [...aPlan().procedure.passes, inside], insideLegIn: '0.25' },
+      },
+    ],
     ['two seals and two ports', { head: { seals: 2, sealAboveBaseIn: ['7.75', '6.5'], ports: 2 } }],
     ['the outlet as datum', { terms: { datum: 'outlet', targetHeightIn: '-2' } }],
     ['the base as datum', { terms: { datum: 'base', targetHeightIn: '-18' } }],
@@ -69,7 +78,9 @@ describe('a low cut', () => {
     recordPoint(job, 'final-cut', low);
     presentPoint(job, 'final-cut');
     const items = [{ limit: 'cut-low', basis: [] as string[], reason: 'Accepted by the operator.' }];
-    expect(job.refused('concede', { point: 'final-cut', items, ...job.signing('final-cut') }, job.person('company_rep'))).toBe('verdict-moved');
+    expect(
+      job.refused('concede', { point: 'final-cut', items, ...job.signing('final-cut') }, job.person('company_rep')),
+    ).toBe('verdict-moved');
   });
 });
 
@@ -80,17 +91,29 @@ describe('a failed test', () => {
     const job = aJob();
     walkTo(job, 'pressure-test-held');
     recordPoint(job, 'pressure-test-held', failed);
-    expect(job.refused('open-repair-round', { reason: 'Lost 100 psi.', passes: 2, ...job.signingJob() }, job.person('welder'))).toBe('not-yours-to-do');
-    job.do('open-repair-round', { reason: 'Lost 100 psi at the weld.', passes: 2, ...job.signingJob() }, job.person('company_rep'));
-    expect(statuses(job).slice(-6)).toEqual([
-      'pressure-test-held shut',
-      'test-plug-removed-r1 open',
-      'preheat-reached-r1 shut',
-      'pass-1-inspected-r1 shut',
-      'pass-2-inspected-r1 shut',
-      'cooled-to-touch-r1 shut',
-      'pressure-test-held-r1 shut',
-    ].slice(1));
+    expect(
+      job.refused(
+        'open-repair-round',
+        { reason: 'Lost 100 psi.', passes: 2, ...job.signingJob() },
+        job.person('welder'),
+      ),
+    ).toBe('not-yours-to-do');
+    job.do(
+      'open-repair-round',
+      { reason: 'Lost 100 psi at the weld.', passes: 2, ...job.signingJob() },
+      job.person('company_rep'),
+    );
+    expect(statuses(job).slice(-6)).toEqual(
+      [
+        'pressure-test-held shut',
+        'test-plug-removed-r1 open',
+        'preheat-reached-r1 shut',
+        'pass-1-inspected-r1 shut',
+        'pass-2-inspected-r1 shut',
+        'cooled-to-touch-r1 shut',
+        'pressure-test-held-r1 shut',
+      ].slice(1),
+    );
     walkTo(job, null);
     job.do('seal', { concessions: concessionTotal(job.job), ...job.signingJob() }, job.person('company_rep'));
     expect(job.job.status).toBe('sealed');
@@ -104,12 +127,16 @@ describe('a failed test', () => {
     const shownBefore = job.signingJob();
     recordPoint(job, 'pressure-test-held', failed);
     const round = { reason: 'Lost 100 psi at the weld.', passes: 2 };
-    expect(job.refused('open-repair-round', { ...round, ...shownBefore }, job.person('company_rep'))).toBe('content-changed');
+    expect(job.refused('open-repair-round', { ...round, ...shownBefore }, job.person('company_rep'))).toBe(
+      'content-changed',
+    );
     const signed = job.signingJob();
     job.do('open-repair-round', { ...round, ...signed }, job.person('company_rep'));
     expect(job.events.at(-1)).toMatchObject({
       type: 'repair-round-opened',
-      body: { signature: { meaning: 'signature.open-repair-round', role: 'company_rep', contentHash: signed.contentHash } },
+      body: {
+        signature: { meaning: 'signature.open-repair-round', role: 'company_rep', contentHash: signed.contentHash },
+      },
     });
     expect(checkSignatures(job.id, job.events, hash)?.every((one) => one.bound)).toBe(true);
   });
@@ -117,7 +144,13 @@ describe('a failed test', () => {
   it('is not opened before point 10', async () => {
     const job = aJob();
     walkTo(job, 'bevel-prep');
-    expect(job.refused('open-repair-round', { reason: 'too early', passes: 1, ...job.signingJob() }, job.person('company_rep'))).toBe('no-round-here');
+    expect(
+      job.refused(
+        'open-repair-round',
+        { reason: 'too early', passes: 1, ...job.signingJob() },
+        job.person('company_rep'),
+      ),
+    ).toBe('no-round-here');
   });
 });
 
@@ -126,7 +159,11 @@ describe('a head that is cut off again', () => {
     const job = aJob();
     walkTo(job, 'pass-2-inspected');
     const head = { ...job.job.plan.head, id: 'head-2', name: 'HD-11-3M rev 3' };
-    job.do('set-again', { reason: 'The seal rolled.', head, targetHeightIn: '5', ...job.signingJob() }, job.person('company_rep'));
+    job.do(
+      'set-again',
+      { reason: 'The seal rolled.', head, targetHeightIn: '5', ...job.signingJob() },
+      job.person('company_rep'),
+    );
     expect(job.job).toMatchObject({ setting: 2, headSet: false });
     expect(job.job.earlierSettings[0]?.points.filter((point) => point.status === 'released')).toHaveLength(9);
     expect(job.job.points[0]?.status).toBe('open');
@@ -152,7 +189,9 @@ describe('the valve', () => {
   it('is not named any more once the head has been set', async () => {
     const job = aJob();
     walkTo(job, 'valve-orientation');
-    expect(job.refused('name-direction', { direction: 'doghouse', words: null }, job.person('tool_pusher'))).toBe('head-already-set');
+    expect(job.refused('name-direction', { direction: 'doghouse', words: null }, job.person('tool_pusher'))).toBe(
+      'head-already-set',
+    );
   });
 });
 
@@ -161,7 +200,11 @@ describe('plug custody', () => {
     const job = aJob();
     walkTo(job, 'preheat-reached');
     expect(job.job.custody[0]).toMatchObject({ out: true, holder: 'W. Calder' });
-    job.do('reopen', { point: 'valve-orientation', reason: 'Measure again.', ...job.signing('valve-orientation') }, job.person('company_rep'));
+    job.do(
+      'reopen',
+      { point: 'valve-orientation', reason: 'Measure again.', ...job.signing('valve-orientation') },
+      job.person('company_rep'),
+    );
     expect(job.job.custody[0]).toMatchObject({ out: true });
     walkTo(job, 'pressure-test-held');
     recordPoint(job, 'pressure-test-held', { 'plug.1.back': 'not-back' });

@@ -8,7 +8,12 @@ const aChain = (length: number): ChainLink[] => {
   const links: ChainLink[] = [];
   let prev = chainStart(jobId, hash);
   for (let seq = 1; seq <= length; seq++) {
-    const link = makeLink(jobId, { seq, commandId: idNumber(seq), type: 'readings-recorded', schema: 1, body: { n: seq } }, prev, hash);
+    const link = makeLink(
+      jobId,
+      { seq, commandId: idNumber(seq), type: 'readings-recorded', schema: 1, body: { n: seq } },
+      prev,
+      hash,
+    );
     links.push(link);
     prev = link.hash;
   }
@@ -42,7 +47,11 @@ describe('a chain', () => {
   it('names the place of a missing, doubled or swapped link', () => {
     const links = aChain(6);
     expect(verifyChain(jobId, links.toSpliced(2, 1), hash)).toMatchObject({ holds: false, seq: 3, why: 'gap' });
-    expect(verifyChain(jobId, links.toSpliced(2, 0, links[2]!), hash)).toMatchObject({ holds: false, seq: 4, why: 'gap' });
+    expect(verifyChain(jobId, links.toSpliced(2, 0, links[2]!), hash)).toMatchObject({
+      holds: false,
+      seq: 4,
+      why: 'gap',
+    });
     const swapped = links.with(1, links[2]!).with(2, links[1]!);
     expect(verifyChain(jobId, swapped, hash)).toMatchObject({ holds: false, seq: 2 });
   });
