@@ -84,12 +84,18 @@ const tooSmallForTheTape = 1 / 32;
 /** A caliper's number and the mean of two of them have no more decimals; a length that was worked out has. */
 const caliperDecimals = 4;
 
+/**
+ * A tape's reading set for the eye: held together by a space that does not break, and with the slash of fractions, of
+ * which the font makes a true fraction. An ordinary slash between digits (a well's name, a permit) stays a slash.
+ */
+const setAsFraction = (reading: string): string => reading.replace(' ', '\u00a0').replace('/', '\u2044');
+
 /** Inches as fractions wherever a tape has a mark and for lengths worked out; a caliper's thousandths stay decimals. */
 const printLength = (decimal: string, origin: Origin): string => {
   const value = Number(decimal);
   const onTheTape = Math.abs(value * 64 - Math.round(value * 64)) < 64e-6;
   const asDecimal = decimalsOf(decimal) <= caliperDecimals || Math.abs(value) < tooSmallForTheTape;
-  return !onTheTape && asDecimal ? rounded(value, 3, origin) : printInches(value, 64);
+  return !onTheTape && asDecimal ? rounded(value, 3, origin) : setAsFraction(printInches(value, 64));
 };
 
 /** Past this many minutes nobody counts in minutes. */

@@ -45,7 +45,7 @@ describe('a sealed packet', () => {
   it('tells a low cut with its concessions, their reasons, the reading before and the calculations', () => {
     const cut = words(packet, '#final-cut');
     expect(cut).toContain('Released by O. Brandt');
-    expect(cut).toContain('Before it: 32 1/4 in, W. Calder');
+    expect(cut).toContain('Before it: 32 1⁄4 in, W. Calder');
     expect(cut).toContain('The stack has room for 7/64 in. Nothing more is cut.');
     expect(cut).toContain('I permit the use of what is outside its limit');
     expect(cut).toContain('cut-plane v1');

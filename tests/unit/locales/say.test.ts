@@ -24,7 +24,7 @@ describe('saying a text', () => {
       limit: { quantity: '0.0625', unit: 'in' },
       source: { key: 'source.job' },
     };
-    expect(said('cut.low', params)).toBe("Low by 7/64\u00a0in. Limit 1/16\u00a0in, this job's setting.");
+    expect(said('cut.low', params)).toBe("Low by 7⁄64\u00a0in. Limit 1⁄16\u00a0in, this job's setting.");
     expect(said('at', { at: { instant: '2026-03-02T09:10:00Z' } })).toBe('Presented 02 Mar 2026 03:10');
     // a day has no zone: west of Greenwich it is still the same day
     expect(said('at', { at: { day: '2026-03-02' } })).toBe('Presented 02 Mar 2026');

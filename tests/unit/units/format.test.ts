@@ -11,21 +11,25 @@ const metric = (quantity: string, unit: string, difference?: true) =>
 
 describe('inches', () => {
   it.each([
-    ['14.375', '14 3/8 in'],
-    ['-2.0625', '-2 1/16 in'],
-    ['8.109375', '8 7/64 in'],
-    ['0.0625', '1/16 in'],
-    ['0.03125', '1/32 in'],
-    ['0.015625', '1/64 in'],
+    ['14.375', '14 3⁄8 in'],
+    ['-2.0625', '-2 1⁄16 in'],
+    ['8.109375', '8 7⁄64 in'],
+    ['0.0625', '1⁄16 in'],
+    ['0.03125', '1⁄32 in'],
+    ['0.015625', '1⁄64 in'],
     ['0', '0 in'],
   ])('%s stands as the tape has it: %s', (quantity, text) => expect(imperial(quantity, 'in')).toBe(text));
 
+  it('keeps whole and fraction on one line', () => {
+    expect(quantityParts('14.375', 'in', 'imperial').value).toBe('14\u00a03⁄8');
+  });
+
   it.each([
-    ['32.242188', '32 1/4 in'],
-    ['32.2421875', '32 1/4 in'],
-    ['32.246094', '32 1/4 in'],
-    ['-0.351563', '-23/64 in'],
-    ['14.370079', '14 3/8 in'],
+    ['32.242188', '32 1⁄4 in'],
+    ['32.2421875', '32 1⁄4 in'],
+    ['32.246094', '32 1⁄4 in'],
+    ['-0.351563', '-23⁄64 in'],
+    ['14.370079', '14 3⁄8 in'],
     ['27.999999', '28 in'],
   ])('%s was worked out and goes to the nearest mark: %s', (quantity, text) =>
     expect(imperial(quantity, 'in')).toBe(text),
@@ -101,7 +105,7 @@ describe('every other unit', () => {
     expect(metric('14.370079', 'in')).toBe('365 mm');
     expect(metric('310', 'degF')).toBe('154 °C');
     expect(metric('1500', 'psi')).toBe('10342 kPa');
-    expect(imperial('365.125', 'mm')).toBe('14 3/8 in');
+    expect(imperial('365.125', 'mm')).toBe('14 3⁄8 in');
   });
 
   it('keeps a difference of temperatures a difference', () => {
@@ -125,7 +129,7 @@ describe('every other unit', () => {
       fc.property(numbers, units, fc.constantFrom('imperial', 'metric'), (number, unit, system) => {
         for (const quantity of [toDecimal(number), String(number)]) {
           const { value } = quantityParts(quantity, unit, system);
-          expect(value, `${quantity} ${unit}`).toMatch(/^-?[\d /h\u00a0]+(\.\d{1,6})?$/);
+          expect(value, `${quantity} ${unit}`).toMatch(/^-?[\d⁄h\u00a0]+(\.\d{1,6})?$/);
           if (Math.abs(number) >= 1) expect(value, `${quantity} ${unit}`).not.toMatch(/\.\d{5,}/);
         }
       }),
