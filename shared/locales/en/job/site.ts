@@ -5,6 +5,7 @@ export default {
   numbers: {
     title: 'The numbers',
     target: 'Target above ground',
+    'stand-off': 'Stand-off at the shoulder',
     takeoff: 'Takeoff by the drawing',
     cut: 'Cut elevation above ground',
     mark: 'Cut mark from the string',
@@ -97,6 +98,7 @@ export default {
     changed: 'Changed by {name}, {at}: {reason}',
     save: 'Change the terms',
     standOff: 'Stand-off left at the shoulder',
+    signedHere: 'Terms and settings, signed with this release',
     names: { datum: 'Datum', targetHeightIn: 'Target height', standOffIn: 'Stand-off', test: 'Pressure test' },
     mend: 'A value is outside what a programme may set. Mend it first.',
     outOfRange: 'Between {min} and {max}',
