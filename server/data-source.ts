@@ -27,7 +27,8 @@ export function makeDataSource(config: Config, as: 'app' | 'owner' = 'app'): Dat
     supportBigNumbers: true,
     bigNumberStrings: true,
     connectTimeout: 5_000,
-    poolSize: pool,
+    // migrations hold one connection for their lock while another works
+    poolSize: as === 'owner' ? Math.max(2, pool) : pool,
     isolationLevel: 'READ COMMITTED',
     entities,
     migrations,

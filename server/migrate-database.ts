@@ -1,17 +1,35 @@
 import type { DataSource } from 'typeorm';
 import { appendOnlyTables } from './ledger/append-only-tables';
 
+/** A process that starts waits this long for another that is migrating, in seconds. */
+const patienceS = 120;
+
 /** Tables that the application never sees. */
 const ownersTables = new Set(['migrations']);
 
 /**
  * Brings the tables up to date and says anew, table by table, what the application's account may do: everything but
  * changing the schema, and on event tables reading and adding only. The triggers stop the owner's hand too; the grants
- * stop TRUNCATE, which passes triggers by.
+ * stop TRUNCATE, which passes triggers by. Of two processes that start at once the second waits and finds it done.
  * @param owner a connection of the account that owns the tables
  * @param app name of the application's account
  */
 export async function migrateDatabase(owner: DataSource, app: string): Promise<void> {
+  const line = owner.createQueryRunner();
+  const [{ name }] = (await line.query("SELECT CONCAT(DATABASE(), '.migration') AS name")) as [{ name: string }];
+  try {
+    const [{ got }] = (await line.query('SELECT GET_LOCK(?, ?) AS got', [name, patienceS])) as [
+      { got: number | string },
+    ];
+    if (Number(got) !== 1) throw new Error('another process is still bringing the tables up to date');
+    await migrate(owner, app);
+  } finally {
+    await line.query('DO RELEASE_LOCK(?)', [name]);
+    await line.release();
+  }
+}
+
+async function migrate(owner: DataSource, app: string): Promise<void> {
   await owner.runMigrations({ transaction: 'each' });
   const tables = await owner.query<{ name: string }[]>(
     "SELECT TABLE_NAME AS name FROM information_schema.TABLES WHERE TABLE_SCHEMA = DATABASE() AND TABLE_TYPE = 'BASE TABLE'",

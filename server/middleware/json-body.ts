@@ -13,7 +13,8 @@ function isTreacherous(body: unknown): boolean {
     for (const value of level) {
       if (typeof value !== 'object' || value === null) continue;
       if (Object.hasOwn(value, '__proto__')) return true;
-      below.push(...Object.values(value));
+      // one by one: a long list spread over the arguments of a call would fill the stack
+      for (const inner of Object.values(value)) below.push(inner);
     }
     level = below;
   }

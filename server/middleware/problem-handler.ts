@@ -27,12 +27,20 @@ function asProblem(error: unknown): Problem {
   return known ?? new Problem(500, 'server.failed');
 }
 
+/** A failure as the log may keep it: a failed query carries its values along, hashes of secrets among them. */
+function withoutValues(error: unknown): unknown {
+  if (!(error instanceof Error)) return { type: typeof error };
+  const { name, message, stack } = error;
+  return { type: name, message, stack, ...('code' in error && { code: error.code }) };
+}
+
 /** The last handler: every failure leaves as problem+json, and only the log knows the stack. */
 export function problemHandler(log: Logger): ErrorRequestHandler {
   return (error, req, res, next) => {
     const problem = asProblem(error);
     const id = typeof req.id === 'string' ? req.id : undefined;
-    if (problem.status >= 500) log.error({ err: error, requestId: id, code: problem.code }, 'request failed');
+    if (problem.status >= 500)
+      log.error({ err: withoutValues(error), requestId: id, code: problem.code }, 'request failed');
     if (res.headersSent) return next(error);
     const { retryAfter, headers } = problem.details;
     if (retryAfter !== undefined) res.set('Retry-After', String(Math.max(1, Math.ceil(retryAfter))));

@@ -24,7 +24,9 @@ export async function checkSignIn(
     (await takeAttempt(dataSource, 'signInAddress', typed.address, clock())) ??
     (await takeAttempt(dataSource, 'signInAccount', email, clock()));
   if (wait !== null) return { ok: false, code: 'sign-in.locked', retryAfter: wait };
-  const account = await dataSource.getRepository(Account).findOneBy({ email });
+  const found = await dataSource.getRepository(Account).findOneBy({ email });
+  // the database takes letters with and without an accent for the same; each such spelling would have its own count of tries
+  const account = found?.email === email ? found : null;
   const matches = await passwordMatches(account?.passwordHash ?? null, typed.password);
   if (!matches || !account || account.deactivatedAt || (account.demo && !config.demo)) {
     return { ok: false, code: 'sign-in.refused' };

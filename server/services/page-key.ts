@@ -9,7 +9,6 @@ export const printPageKey = ({ at, id }: PageKey): string => `${at.getTime().toS
 
 /** Reads it back; null for what no list ever gave out. */
 export function readPageKey(text: string | undefined): PageKey | null {
-  const match = /^([0-9a-z]{1,11})\.([0-9a-f-]{36})$/.exec(text ?? '');
-  const at = new Date(parseInt(match?.[1] ?? '', 36));
-  return match?.[2] && !Number.isNaN(at.getTime()) ? { at, id: match[2] } : null;
+  const [, at, id] = /^([0-9a-z]{1,9})\.([0-9a-f-]{36})$/.exec(text ?? '') ?? [];
+  return at && id ? { at: new Date(parseInt(at, 36)), id } : null;
 }

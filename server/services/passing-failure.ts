@@ -14,7 +14,13 @@ const gone = new Set([
   'ER_LOCK_DEADLOCK',
   'ER_DISK_FULL',
   'ER_RECORD_FILE_FULL',
+  'ER_TOO_MANY_USER_CONNECTIONS',
   'ENOSPC',
+  'EDQUOT',
+  'EROFS',
+  'EIO',
+  'EMFILE',
+  'ENFILE',
 ]);
 
 /**

@@ -193,13 +193,20 @@ const bodies = {
 export type CommandType = keyof typeof bodies;
 export const commandTypes = Object.keys(bodies) as CommandType[];
 
+/** From where device clocks begin to count to the last year of four digits: what every form of the record can print. */
+const canBeDated = (ms: number): boolean => ms >= 0 && ms < Date.UTC(10_000, 0);
+
 /** What stands beside a command's body: its id, and what the device knew of the time when it was made. */
-const clock = z.strictObject({
-  deviceAt: instant,
-  /** add to the device's time to get the server's; null when never measured */
-  offsetMs: z.int().nullable(),
-  doubtMs: z.int().min(0).nullable(),
-});
+const clock = z
+  .strictObject({
+    deviceAt: instant,
+    /** add to the device's time to get the server's; null when never measured */
+    offsetMs: z.int().nullable(),
+    doubtMs: z.int().min(0).nullable(),
+  })
+  .refine(({ deviceAt, offsetMs }) => [0, offsetMs ?? 0].every((shift) => canBeDated(Date.parse(deviceAt) + shift)), {
+    path: ['deviceAt'],
+  });
 
 const commandOf = <T extends CommandType>(type: T) =>
   z.strictObject({

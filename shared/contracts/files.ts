@@ -3,7 +3,7 @@ import { FILE_TYPES } from '../photos/limits';
 import { defineRoute } from './contract';
 
 const address = z.strictObject({
-  id: z.uuid(),
+  id: z.uuid().lowercase(),
   /** the file's own bytes name it: SHA-256 in lower-case hex */
   sha256: z.string().regex(/^[0-9a-f]{64}$/),
 });

@@ -61,7 +61,10 @@ export type JobEvents = z.infer<typeof eventsSchema>;
 export const eventsQuery = z.strictObject({ after: z.coerce.number().int().min(0).max(1_000_000).default(0) });
 
 /** Where a list goes on: as `next` gave it, never put together by hand. */
-export const pageAfter = z.string().max(120).optional();
+export const pageAfter = z
+  .string()
+  .regex(/^[0-9a-z]{1,9}\.[0-9a-f-]{36}$/)
+  .optional();
 
 const short = z.string().trim().min(1).max(200);
 
