@@ -96,8 +96,15 @@ export const evolveSequence = (state: JobState, event: JobEvent): JobState => {
         presentation: { by: actor, at, contentHash, judged },
       }));
     }
-    case 'presentation-withdrawn':
-      return changePoint(state, event.body.point, (one) => ({ ...one, status: 'open', presentation: null }));
+    case 'presentation-withdrawn': {
+      const { point, actor, at } = event.body;
+      return changePoint(state, point, (one) => ({
+        ...one,
+        status: 'open',
+        presentation: null,
+        withdrawn: [...one.withdrawn, { by: actor, at }],
+      }));
+    }
     case 'point-sent-back': {
       const { point, reason, contentHash, actor, at } = event.body;
       return changePoint(state, point, (one) => ({

@@ -16,6 +16,7 @@ export const blankPoint = (place: PointPlace): PointState => ({
   place,
   status: 'shut',
   sentBack: [],
+  withdrawn: [],
   reopened: [],
   superseded: [],
   carriedInto: null,

@@ -99,6 +99,8 @@ export interface PointState extends Evidence {
   status: PointStatus;
   /** all sendings back, the newest last; on top of an open point until it is presented again */
   sentBack: SentBack[];
+  /** presentations taken back before they were answered, the newest last */
+  withdrawn: { by: ActorStamp; at: Times }[];
   reopened: { reason: string; by: ActorStamp; at: Times }[];
   superseded: Evidence[];
   /** the repair round that carried this unreleased point's work on, if one did */

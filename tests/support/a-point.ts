@@ -99,6 +99,7 @@ const aPointState = (place: PointPlace, status: PointState['status'], spec?: Poi
   presentation: null,
   release: null,
   sentBack: [],
+  withdrawn: [],
   reopened: [],
   superseded: [],
   carriedInto: null,

@@ -170,6 +170,7 @@ export const families = (): Record<string, readonly string[]> => ({
   ]),
   'app.role.${…}': under('app.role', roles),
   'desk.${…}': ['desk.released', 'desk.back'],
+  'desk.goneBy.${…}': ['desk.goneBy.sentBack', 'desk.goneBy.withdrawn', 'desk.goneBy.reopened'],
   'entry.${…}': under('entry', [...parseRefusals, ...answers]),
   'errors.${…}': under('errors', errorCodes()),
   'errors.password.${…}': under('errors.password', password),

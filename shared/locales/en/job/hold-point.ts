@@ -72,6 +72,7 @@ export default {
   waitingFor: 'It waits for the {role}. Nothing changes until it is released, sent back or withdrawn.',
   touchAt: 'By its cooling it reaches {touch} at {at}.',
   withdraw: 'Withdraw',
+  withdrawnBy: 'The last presentation was withdrawn by {name}, {at}. Nothing waits for a release here now.',
   withdrawWhy: 'The hold point is open again and you can record more.',
   drafted: 'drafted',
   draftReady: {
