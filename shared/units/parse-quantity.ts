@@ -74,13 +74,21 @@ const explain = (text: string): ParseRefusal => {
   return 'quantity-not-understood';
 };
 
-/** `14,375` is 14.375; `1,250` psi may be one and a quarter or twelve hundred and fifty, so it is sent back. */
+/** Units in which a thousandth is read and a thousand is not: there a comma can only be the decimal one. */
+const NEVER_THOUSANDS: ReadonlySet<Unit> = new Set<Unit>(['in', 'm']);
+
+/** The unit as typed behind a number with a comma, or else the one that a bare number is in. */
+const unitBehind = (text: string, defaultUnit: Unit): Unit =>
+  unitNamed(/,\d+ ?(?<word>[^\d\s]\D*)$/.exec(text)?.groups?.word ?? '') ?? defaultUnit;
+
+/** `14,375` in is 14.375; `1,250` mm may be one and a quarter or twelve hundred and fifty, so it is sent back. */
 const settleComma = (text: string, defaultUnit: Unit): string | ParseRefusal => {
   const commas = text.split(',').length - 1;
   if (commas === 0) return text;
   if (commas > 1 || text.includes('.')) return 'quantity-many-commas';
   if (!/\d,\d/.test(text)) return 'quantity-not-understood';
-  const mayBeThousands = /(?<!\d)[1-9]\d{0,2},\d{3}(?!\d)/.test(text) && dimensionOf(defaultUnit) !== 'length';
+  const looksLikeThousands = /(?<!\d)[1-9]\d{0,2},\d{3}(?!\d)/.test(text);
+  const mayBeThousands = looksLikeThousands && !NEVER_THOUSANDS.has(unitBehind(text, defaultUnit));
   return mayBeThousands ? 'quantity-comma-ambiguous' : text.replace(',', '.');
 };
 

@@ -16,6 +16,13 @@ describe('a quantity is read as the tape says it', () => {
     ['14-3/8', '14.375 in'],
     ['14.375', '14.375 in'],
     ['14,375', '14.375 in'],
+    ['14,5 mm', '14.5 mm'],
+    ['0,365 m', '0.365 m'],
+    ['1,365 m', '1.365 m'],
+    ["1'-2 3/8", '14.375 in'],
+    ['-5\' 3"', '-63 in'],
+    ["5' 11 15/16", '71.9375 in'],
+    ['+1 1/2', '1.5 in'],
     ['3/8', '0.375 in'],
     ['-2 1/16', '-2.0625 in'],
     ['−2 1/16', '-2.0625 in'],
@@ -52,6 +59,9 @@ describe('a quantity is read as the tape says it', () => {
     ['12.5 min', 's', '12.5 min'],
     ['2 h', 'min', '2 h'],
     ['90 s', 'min', '90 s'],
+    ['15 minutes', 'min', '15 min'],
+    ['2 hours', 'min', '2 h'],
+    ['14,375 in', 'mm', '14.375 in'],
   ])('%s where %s is expected', (text, unit, expected) => expect(read(text, unit)).toBe(expected));
 
   it('lands 6 ft 3-5/16 in on 1912.9375 mm (NIST SP 811: 25.4 mm to the inch)', () => {
@@ -71,6 +81,12 @@ describe('what cannot be meant is refused with its own reason', () => {
     ['12,5,3', 'in', 'quantity-many-commas'],
     ['1,250.5', 'psi', 'quantity-many-commas'],
     ['1,250', 'psi', 'quantity-comma-ambiguous'],
+    // twelve hundred and fifty millimetres must not become one and a quarter
+    ['1,250 mm', 'in', 'quantity-comma-ambiguous'],
+    ['1,250', 'mm', 'quantity-comma-ambiguous'],
+    ['1,250 ft', 'in', 'quantity-comma-ambiguous'],
+    ['1 64/64', 'in', 'quantity-fraction-not-proper'],
+    ["5' 12", 'in', 'quantity-inches-reach-a-foot'],
     ['NaN', 'in', 'quantity-not-finite'],
     ['Infinity', 'in', 'quantity-not-finite'],
     ['-∞', 'in', 'quantity-not-finite'],
