@@ -1,13 +1,14 @@
 import { greatest, least } from './extremes';
+import { temperaturesBetween } from './temperatures-between';
 import { NITROGEN_F, nitrogenGauge, nitrogenPressureAt } from './nitrogen-temperature';
 import { firstRefusal, firstRefusalIn, mustBe, refuse, type Outcome } from './outcome';
 import { POSITIVE_PRESSURE_PSI, PRESSURE_PSI } from './ranges';
 
 export const pressureHoldInfo = {
   id: 'pressure-hold',
-  version: 1,
+  version: 2,
   formula:
-    'lowest ≥ target; start − lowest ≤ allowed; for nitrogen with temperatures: expected at equal density − reading ≤ allowed',
+    'lowest ≥ target; start − lowest ≤ allowed; for nitrogen with temperatures (straight between two readings): expected at equal density − reading ≤ allowed',
   source: 'common practice; nitrogen by the reference equation of state of Span and others (2000)',
   range: 'readings at both ends of the hold',
 } as const;
@@ -53,7 +54,7 @@ export interface HoldTest {
 }
 
 const SECONDS = { atLeast: -1e10, atMost: 1e10 } as const;
-/** Below any gauge's resolution; keeps a drop equal to the allowance from failing on rounding alone. */
+/** Below any gauge's resolution; keeps a pressure or a drop on its limit from failing on rounding alone. */
 const SLACK_PSI = 1e-6;
 
 const numbersFit = (test: HoldTest) =>
@@ -73,15 +74,19 @@ const numbersFit = (test: HoldTest) =>
     ),
   );
 
-/** Largest unexplained fall against the first reading; null when a temperature is missing at either end. */
+/**
+ * Largest unexplained fall against the first reading; null when a temperature is missing at either end. A reading
+ * without one in between is held against the straight line between its neighbours, so that no dip hides there.
+ */
 const correctedDrop = (first: HoldSample, last: HoldSample, during: readonly HoldSample[]): number | null => {
   const startF = first.temperatureF;
   if (startF === undefined || last.temperatureF === undefined) return null;
   const start = { pressurePsig: first.pressurePsig, temperatureF: startF, newTemperatureF: startF };
   const gas = nitrogenPressureAt(start);
   if (!gas.ok) return null;
-  const unexplained = during.map(({ pressurePsig, temperatureF }) =>
-    temperatureF === undefined ? 0 : nitrogenGauge(gas.densityMolM3, temperatureF) - pressurePsig,
+  const temperatures = temperaturesBetween(during);
+  const unexplained = during.map(
+    ({ pressurePsig }, index) => nitrogenGauge(gas.densityMolM3, temperatures[index] ?? startF) - pressurePsig,
   );
   return Math.max(0, greatest(unexplained));
 };
@@ -112,7 +117,7 @@ export const pressureHold = (test: HoldTest): Outcome<PressureHold> => {
     ['start-not-covered', first.timeS - holdStartS > toleranceS],
     ['end-not-covered', holdEndS - last.timeS > toleranceS],
     ['clock-short', holdEndS - holdStartS < test.holdS],
-    ['below-target', lowestPsig < test.targetPsig],
+    ['below-target', lowestPsig < test.targetPsig - SLACK_PSI],
     ['drop-over-allowed', (correctedDropPsi ?? dropPsi) > test.allowedDropPsi + SLACK_PSI],
   ];
   const findings = against.filter(([, found]) => found).map(([finding]) => finding);

@@ -82,6 +82,35 @@ describe('the pressure hold', () => {
     expect(verdict.correctedDropPsi).toBeGreaterThan(60);
   });
 
+  it('does not let a reading without a temperature hide a dip that was pumped up again', () => {
+    const dip = answer(hold([sample(0, 1000, 70), sample(7, 930), sample(15, 1000, 70)]));
+    expect(dip.findings).toEqual(['drop-over-allowed']);
+    expect(dip.correctedDropPsi).toBeCloseTo(70, 6);
+  });
+
+  it('takes the temperature of a reading without one from the line between its neighbours', () => {
+    const cooled = (inBetween: number) => hold([sample(0, 1000, 90), sample(5, inBetween), sample(15, 936.26, 60)]);
+    const { expectedPsig } = answer(nitrogenPressureAt({ pressurePsig: 1000, temperatureF: 90, newTemperatureF: 80 }));
+    expect(answer(cooled(expectedPsig - 10)).held).toBe(true);
+    expect(answer(cooled(expectedPsig - 10.01)).findings).toEqual(['drop-over-allowed']);
+  });
+
+  it('judges as read where a temperature is missing at either end', () => {
+    for (const readings of [
+      [sample(0, 1000), sample(7, 990, 70), sample(15, 960, 60)],
+      [sample(0, 1000, 90), sample(7, 990, 70), sample(15, 960)],
+    ])
+      expect(answer(hold(readings))).toMatchObject({ judgedBy: 'as-read', findings: ['drop-over-allowed'] });
+  });
+
+  it('takes readings in any order, and the worst of two at one time', () => {
+    expect(answer(hold([sample(15, 1000), sample(0, 1005), sample(7, 1002)]))).toMatchObject({
+      held: true,
+      dropPsi: 5,
+    });
+    expect(answer(hold([sample(0, 1000), sample(15, 950), sample(15, 1000)])).findings).toEqual(['drop-over-allowed']);
+  });
+
   it('does not correct oil', () =>
     expect(answer(hold([sample(0, 1000, 90), sample(15, 999, 60)], { medium: 'oil' })).correctedDropPsi).toBeNull());
 
