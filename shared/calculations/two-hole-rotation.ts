@@ -11,7 +11,9 @@ export const twoHoleRotationInfo = {
 
 /**
  * How far the head is turned, from the offsets of a straightedge through two bolt holes to the substructure, measured
- * a length apart. Positive when the first offset is the larger. Also the miss at the valve, in inches.
+ * a length apart. Positive when the first offset is the larger: with the first end at the left hand of who faces the
+ * substructure, the head is then turned counter-clockwise seen from above. Also the miss at the valve, in inches, with
+ * the same sign.
  */
 export const twoHoleRotation = (measured: {
   firstOffsetIn: number;

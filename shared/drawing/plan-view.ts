@@ -9,7 +9,7 @@ export interface PlanViewInput {
   offsetBIn: number | null;
   /** length between the measuring points, inches */
   lengthIn: number | null;
-  /** two-hole error, degrees, clockwise positive; null before it can be worked out */
+  /** two-hole error, degrees, positive when end A is farther out: counter-clockwise here; null before it is known */
   rotationDeg: number | null;
   /** the named direction in words; null before the tool pusher has named it */
   direction: Text | null;
@@ -120,10 +120,10 @@ const valve = (input: PlanViewInput, lean: number): Primitive[] => {
 
 /**
  * The flange from above with its bolt circle, the straightedge through two holes, both offsets to the substructure and
- * the valve on its bearing. The lean is drawn ten times as large as it is.
+ * the valve on its bearing. End A is the left one: where it is farther out, it is drawn farther out. The lean is drawn ten times as large as it is.
  */
 export const planView = (input: PlanViewInput): Drawing => {
-  const lean = Math.max(Math.min((input.rotationDeg ?? 0) * exaggeration, 20), -20);
+  const lean = Math.max(Math.min((0 - (input.rotationDeg ?? 0)) * exaggeration, 20), -20);
   const error: Primitive[] =
     input.rotationDeg === null
       ? []

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { twoHoleRotation } from '../../../shared/calculations';
 import { planView, type PlanViewInput } from '../../../shared/drawing/plan-view';
 import type { Drawing, Primitive } from '../../../shared/drawing/primitives';
 import { quadrantClock } from '../../../shared/drawing/quadrant-clock';
@@ -53,7 +54,7 @@ describe('the plan view', () => {
     offsetAIn: 31.375,
     offsetBIn: 31.5,
     lengthIn: 48,
-    rotationDeg: 0.149,
+    rotationDeg: -0.149,
     direction: { key: 'points.valve-orientation.choices.direction.mud-tanks' },
     bearingDeg: null,
     outside: false,
@@ -81,9 +82,30 @@ describe('the plan view', () => {
       return line?.kind === 'line' ? line.to.y - line.from.y : Number.NaN;
     };
     expect(drop(0)).toBe(0);
-    expect(drop(0.3)).toBeGreaterThan(0);
-    expect(drop(-0.3)).toBeLessThan(0);
+    expect(drop(0.3)).toBeLessThan(0);
+    expect(drop(-0.3)).toBeGreaterThan(0);
     expect(drop(90)).toBe(drop(2));
+  });
+
+  it('draws the end that is farther out farther out, as the two holes were reckoned', () => {
+    const offset = fc.double({ min: 20, max: 60, noNaN: true });
+    fc.assert(
+      fc.property(offset, offset, (offsetAIn, offsetBIn) => {
+        fc.pre(Math.abs(offsetAIn - offsetBIn) > 0.01);
+        const offsets = { firstOffsetIn: offsetAIn, secondOffsetIn: offsetBIn, betweenIn: 48, outletReachIn: 21 };
+        const turned = twoHoleRotation(offsets);
+        const { primitives } = planView({
+          ...input,
+          offsetAIn,
+          offsetBIn,
+          rotationDeg: turned.ok ? turned.rotationDeg : 0,
+        });
+        const edge = primitives.find((one) => one.kind === 'line' && one.tone === 'straw');
+        if (edge?.kind !== 'line') expect.fail('no straightedge');
+        // the substructure lies at the top of the sheet, end A at the left
+        expect(Math.sign(edge.from.y - edge.to.y)).toBe(Math.sign(offsetAIn - offsetBIn));
+      }),
+    );
   });
 
   it('says in words which way the valve faces and what was measured', () => {
