@@ -1,7 +1,7 @@
 import { refuse, type Outcome } from './outcome';
 
 /** How a row was come by; a crew is shown it beside the numbers. */
-export type FlangeRowStatus = 'stated' | 'read in a public copy' | 'from memory';
+export type FlangeRowStatus = 'stated' | 'from memory';
 
 export interface Flange {
   /** Nominal size as stamped: `13-5/8`. */
@@ -30,7 +30,6 @@ const BORES: Readonly<Record<string, number>> = {
 
 type Row = readonly [string, Flange['ratedPsi'], Flange['type'], number, string, number, string, FlangeRowStatus];
 const STATED = 'stated';
-const READ = 'read in a public copy';
 const MEMORY = 'from memory';
 
 /** Size, rated pressure, type, number of bolts, bolt, bolt circle, ring, status. There is no 21-1/4 at 3000. */
@@ -54,13 +53,13 @@ const ROWS: readonly Row[] = [
   ['16-3/4', 5000, '6BX', 16, '1-7/8', 26.62, 'BX-162', MEMORY],
   ['18-3/4', 5000, '6BX', 20, '2', 31.62, 'BX-163', MEMORY],
   ['21-1/4', 5000, '6BX', 24, '2', 34.88, 'BX-165', MEMORY],
-  ['7-1/16', 10000, '6BX', 12, '1-1/2', 15.88, 'BX-156', READ],
-  ['9', 10000, '6BX', 16, '1-1/2', 18.75, 'BX-157', READ],
-  ['11', 10000, '6BX', 16, '1-3/4', 22.25, 'BX-158', READ],
-  ['13-5/8', 10000, '6BX', 20, '1-7/8', 26.5, 'BX-159', READ],
-  ['16-3/4', 10000, '6BX', 24, '1-7/8', 30.56, 'BX-162', READ],
-  ['18-3/4', 10000, '6BX', 24, '2-1/4', 36.44, 'BX-164', READ],
-  ['21-1/4', 10000, '6BX', 24, '2-1/2', 40.25, 'BX-166', READ],
+  ['7-1/16', 10000, '6BX', 12, '1-1/2', 15.88, 'BX-156', MEMORY],
+  ['9', 10000, '6BX', 16, '1-1/2', 18.75, 'BX-157', MEMORY],
+  ['11', 10000, '6BX', 16, '1-3/4', 22.25, 'BX-158', MEMORY],
+  ['13-5/8', 10000, '6BX', 20, '1-7/8', 26.5, 'BX-159', MEMORY],
+  ['16-3/4', 10000, '6BX', 24, '1-7/8', 30.56, 'BX-162', MEMORY],
+  ['18-3/4', 10000, '6BX', 24, '2-1/4', 36.44, 'BX-164', MEMORY],
+  ['21-1/4', 10000, '6BX', 24, '2-1/2', 40.25, 'BX-166', MEMORY],
 ];
 
 /** Wellhead flanges by nominal size and rated working pressure. Source: API 6A types 6B and 6BX, customary sizes. */

@@ -9,6 +9,9 @@ export const gaugeRangeInfo = {
   range: '0 ≤ low < high ≤ 100 %',
 } as const;
 
+/** Scales in bar are not exact in psi: a hair of slack, far below any gauge's resolution. */
+const SLACK_PSI = 1e-6;
+
 /** Whether a gauge reads a target in the good part of its scale, psi and percent, and what that part spans. */
 export const gaugeRange = (gauge: {
   targetPsi: number;
@@ -25,6 +28,6 @@ export const gaugeRange = (gauge: {
   );
   if (refused) return refused;
   const [lowPsi, highPsi] = [(fullScalePsi * lowPct) / 100, (fullScalePsi * highPct) / 100];
-  const verdict = targetPsi < lowPsi ? 'below' : targetPsi > highPsi ? 'above' : 'within';
+  const verdict = targetPsi < lowPsi - SLACK_PSI ? 'below' : targetPsi > highPsi + SLACK_PSI ? 'above' : 'within';
   return { ok: true, sharePct: (100 * targetPsi) / fullScalePsi, lowPsi, highPsi, verdict };
 };
