@@ -7,7 +7,7 @@ export type CollapseRegime = 'yield' | 'plastic' | 'transition' | 'elastic';
 
 export const casingCollapseInfo = {
   id: 'casing-collapse',
-  version: 1,
+  version: 2,
   formula:
     'yield 2Y(x−1)/x²; plastic Y(A/x−B)−C; transition Y(F/x−G); elastic 46.95e6/(x(x−1)²), with x = D/t to two decimals',
   source: 'API TR 5C3 (Bulletin 5C3, ISO 10400)',
@@ -33,6 +33,9 @@ export const collapseInRegime = (
   }
 };
 
+/** Far below any gauge or caliper: what halves are rounded by must not hang on the last bit of a double. */
+const DECIMALS = 9;
+
 const regimeAt = (ratio: number, limits: CollapseCoefficients): CollapseRegime => {
   if (ratio <= limits.yieldToPlastic) return 'yield';
   if (ratio <= limits.plasticToTransition) return 'plastic';
@@ -55,7 +58,7 @@ export const casingCollapse = (casing: { odIn: number; wallIn: number; yieldPsi:
     mustBe('wallIn', wallIn, { atLeast: 0.01, atMost: 10 }),
   );
   if (refused) return refused;
-  const diameterToWall = roundTo(odIn / wallIn, 2);
+  const diameterToWall = roundTo(roundTo(odIn / wallIn, DECIMALS), 2);
   if (diameterToWall <= 2) return refuse('wall-too-thick', 'wallIn', { atLeast: 0.01, below: odIn / 2 });
   const coefficients = collapseCoefficients({ yieldPsi });
   if (!coefficients.ok) return coefficients;
@@ -63,7 +66,7 @@ export const casingCollapse = (casing: { odIn: number; wallIn: number; yieldPsi:
   const unroundedPsi = collapseInRegime(regime, diameterToWall, yieldPsi, coefficients);
   return {
     ok: true,
-    collapsePsi: Math.round(unroundedPsi / 10) * 10,
+    collapsePsi: roundTo(roundTo(unroundedPsi, 6) / 10, 0) * 10,
     unroundedPsi,
     regime,
     diameterToWall,

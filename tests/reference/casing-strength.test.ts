@@ -108,6 +108,13 @@ describe('collapse as a whole', () => {
     );
   });
 
+  it('rounds halves up by their decimals, not by the last bit of a double (reference: decimal.js)', () => {
+    const ratio = new Decimal('4.809').div('0.2').toDecimalPlaces(2, Decimal.ROUND_HALF_UP);
+    expect(answer(collapse(4.809, 0.2, 80_000)).diameterToWall).toBe(ratio.toNumber());
+    // D/t 3.2 at 80,000 psi: 2·80,000·2.2/3.2² = 34,375 psi
+    expect(answer(collapse(26.182, 8.192, 80_000)).collapsePsi).toBe(34_380);
+  });
+
   it('refuses a wall that leaves no bore', () => expect(reason(collapse(9.625, 5))).toBe('wall-too-thick'));
 });
 

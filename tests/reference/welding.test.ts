@@ -165,6 +165,14 @@ describe('the fillet plan (geometry, Pappus)', () => {
     expect(judge(0.5, 0.37, 5)).toBe('too-small');
     expect(judge(0.1875, 0.125, 10)).toBe('tolerable');
     expect(judge(0.1875, 0.12, 10)).toBe('too-small');
+    expect(judge(0.25, 0.15625, 10)).toBe('tolerable');
+    expect(judge(0.25, 0.15, 10)).toBe('too-small');
+    expect(judge(0.3125, 0.1875, 10)).toBe('tolerable');
+  });
+  it('gets the smaller allowance between two sizes, however the leg was typed', () => {
+    const allowed = (planLegIn: number) =>
+      answer(filletUndersize({ planLegIn, measuredLegIn: planLegIn, undersizeSharePct: 0 })).allowedUnderIn;
+    expect([0.2, 4.7625 / 25.4, 0.3, 7.9375 / 25.4].map(allowed)).toEqual([1 / 16, 1 / 16, 3 / 32, 1 / 8]);
   });
 });
 
