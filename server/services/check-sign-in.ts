@@ -1,6 +1,7 @@
 import { Account } from '../entities/account';
 import { forgetAttempts, giveBackAttempt, takeAttempt } from './attempts';
 import type { AppDeps } from './deps';
+import { networkOf } from './network-of';
 import { passwordMatches } from './secrets';
 
 export type SignInAnswer =
@@ -20,8 +21,9 @@ export async function checkSignIn(
   typed: { email: string; password: string; address: string },
 ): Promise<SignInAnswer> {
   const email = plainEmail(typed.email);
+  const network = networkOf(typed.address);
   const wait =
-    (await takeAttempt(dataSource, 'signInAddress', typed.address, clock())) ??
+    (await takeAttempt(dataSource, 'signInAddress', network, clock())) ??
     (await takeAttempt(dataSource, 'signInAccount', email, clock()));
   if (wait !== null) return { ok: false, code: 'sign-in.locked', retryAfter: wait };
   const found = await dataSource.getRepository(Account).findOneBy({ email });
@@ -32,6 +34,6 @@ export async function checkSignIn(
     return { ok: false, code: 'sign-in.refused' };
   }
   await forgetAttempts(dataSource, 'signInAccount', email);
-  await giveBackAttempt(dataSource, 'signInAddress', typed.address);
+  await giveBackAttempt(dataSource, 'signInAddress', network);
   return { ok: true, accountId: account.id };
 }

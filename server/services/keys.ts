@@ -1,4 +1,4 @@
-import { randomBytes } from 'node:crypto';
+import { randomBytes, randomUUID } from 'node:crypto';
 import { closeSync, fsyncSync, linkSync, mkdirSync, openSync, readFileSync, rmSync, writeSync } from 'node:fs';
 import path from 'node:path';
 
@@ -7,6 +7,9 @@ export interface Keys {
   session: string;
   pin: Buffer;
 }
+
+const isCode = (error: unknown, code: string): boolean =>
+  error instanceof Error && 'code' in error && error.code === code;
 
 /** Reads a key of 32 bytes, or makes it at the first start: mode 0600, on disk before anything is built on it. */
 function readOrMake(folder: string, name: string): Buffer {
@@ -19,19 +22,22 @@ function readOrMake(folder: string, name: string): Buffer {
         throw new Error(`${name} in the folder of keys is damaged: 64 hexadecimal digits are expected.`);
       return key;
     } catch (error) {
-      if (!(error instanceof Error && 'code' in error && error.code === 'ENOENT')) throw error;
+      if (!isCode(error, 'ENOENT')) throw error;
     }
-    const draft = `${file}.${process.pid}`;
+    // a number of the process would do on one machine; two containers share a folder and are both process 1
+    const draft = `${file}.${randomUUID()}`;
     const handle = openSync(draft, 'wx', 0o600);
     writeSync(handle, `${randomBytes(32).toString('hex')}\n`);
     fsyncSync(handle);
     closeSync(handle);
     try {
       linkSync(draft, file);
-    } catch {
+    } catch (error) {
       // another process was first: its key counts
+      if (!isCode(error, 'EEXIST')) throw error;
+    } finally {
+      rmSync(draft);
     }
-    rmSync(draft);
   }
 }
 

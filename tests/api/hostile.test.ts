@@ -1,11 +1,9 @@
 import { v7 } from 'uuid';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { makeDataSource } from '../../server/data-source';
-import { migrateDatabase } from '../../server/migrate-database';
 import { commandTypes } from '../../shared/contracts/commands';
 import { aJobOn, browserOf, sha256 } from '../support/a-job-on';
 import type { JobOn } from '../support/a-job-on';
-import { aRelay } from '../support/a-relay';
+import { aPlanning } from '../support/a-planning';
 import { commandBodies } from '../support/command-bodies';
 import { aJpeg } from '../support/images/make';
 import { startTestApp } from '../support/test-app';
@@ -264,61 +262,17 @@ describe('one account', () => {
   });
 });
 
-describe('the log', () => {
-  it('holds no hash of a secret when the database refuses to keep it', async () => {
-    await on.database.owner.query(
-      "CREATE TRIGGER accounts_broken BEFORE UPDATE ON accounts FOR EACH ROW SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'not now'",
-    );
-    const agent = await on.agentFor('secondToolPusher');
-    const { password } = on.person('secondToolPusher');
-    const pin = await agent.put('/api/account/pin').send({ password, pin: '803417' });
-    const next = await agent
-      .put('/api/account/password')
-      .send({ current: password, next: 'a long enough way of saying' });
-    await on.database.owner.query('DROP TRIGGER accounts_broken');
-    expect([pin.status, next.status]).toEqual([500, 500]);
-    const lines = on.logged.join('\n');
-    expect(lines).toContain('not now');
-    expect(lines).not.toContain('$argon2id');
-    expect(lines).not.toContain('803417');
-  });
-});
-
-describe('a database that goes away in the middle of commands', () => {
-  it('answers 503 with when to come again, loses nothing and recovers by itself', async () => {
-    const relay = await aRelay(on.database.config.database.port);
-    const away = await startTestApp({}, relay.port);
-    const own = await aJobOn(away);
-    const commands = Array.from({ length: 12 }, (_, index) =>
-      own.command('hand-over', { line: `Line ${index}`, to: null }),
-    );
-    await browserOf(away, 'welder');
-    const sent = commands.map((command) => own.post('welder', command));
-    await new Promise((resolve) => setTimeout(resolve, 25));
-    await relay.cut();
-    for (const answer of await Promise.all(sent)) {
-      expect([200, 503], JSON.stringify(answer.body)).toContain(answer.status);
-      if (answer.status === 503) expect(answer.headers['retry-after']).toBe('2');
+describe('an id that something else bears', () => {
+  it('is a command like any other, and nobody is given what it names', async () => {
+    const own = await aJobOn(on);
+    for (const id of [own.id, on.person('coordinator').id, own.state.plan.rig.id]) {
+      const command = own.command('hand-over', { line: 'All well', to: null }, id);
+      expect((await own.post('welder', command)).status).toBe(200);
     }
-    await relay.mend();
-    for (const command of commands) expect((await own.post('welder', command)).status).toBe(200);
-    own.events = [];
-    await own.refresh();
-    expect(own.events.filter((event) => event.type === 'shift-handed-over')).toHaveLength(12);
-    await away.stop();
-    await relay.cut();
-  });
-});
-
-describe('two processes that start at once', () => {
-  it('bring the tables up to date one after the other', async () => {
-    const { owner, config } = on.database;
-    for (const _ of owner.migrations) await owner.undoLastMigration();
-    const second = await makeDataSource(config, 'owner').initialize();
-    try {
-      await Promise.all([owner, second].map((one) => migrateDatabase(one, config.database.user)));
-    } finally {
-      await second.destroy();
-    }
+    const planning = aPlanning(on.clock());
+    const coordinator = await browserOf(on, 'coordinator');
+    await coordinator.post('/api/jobs').send(planning).expect(201);
+    const taken = await own.post('coordinator', own.command('stop-work', { reason: 'Gas' }, planning.commandId));
+    expect([taken.status, taken.body.code]).toEqual([422, 'command.id-reused']);
   });
 });
