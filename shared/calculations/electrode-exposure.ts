@@ -30,7 +30,7 @@ const CLASS = /^E(?<strength>\d{2,3})(?<position>\d)(?<coating>\d)(?<rest>[A-Z0-
 
 /** The longest exposure of a class such as `E7018` or `E7018-1 H4R`; null where the table sets none (cellulosic). */
 export const exposureLimit = (electrodeClass: string): Outcome<{ limitMinutes: number | null }> => {
-  const written = electrodeClass.slice(0, 40).toUpperCase().replace(/[\s]/g, '');
+  const written = electrodeClass.slice(0, 40).toUpperCase().replace(/[\s/]/g, '').replace(/^E-/, 'E');
   const parts = CLASS.exec(written)?.groups;
   if (!parts) return refuse('electrode-class-unknown', 'electrodeClass');
   const { strength = '', coating = '', rest = '' } = parts;

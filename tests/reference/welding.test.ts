@@ -105,6 +105,14 @@ describe('electrode exposure (AWS D1.1; E80 to E110 and the R suffix from memory
   it.each([
     ['E7018-1 H4R', 540],
     ['e7018-1', 240],
+    // the ways it is stamped and written: none may leave a rod without its limit
+    ['E7018/H4R', 540],
+    ['E-7018', 240],
+    ['E7018 H4', 240],
+    ['E7018R', 540],
+    ['E7018M', 240],
+    ['E10018M', 30],
+    ['E7016-1', 240],
     ['E8018-C3', 120],
     ['E8018-C3 H4R', 540],
     ['E9018-B3', 60],
