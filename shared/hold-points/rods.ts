@@ -28,12 +28,12 @@ export const rodGroup = ({ pass }: PointContext): GroupDefinition => ({
   ],
 });
 
-const bare = (electrodeClass: string): string => electrodeClass.toUpperCase().replace(/\s/g, '');
+const bare = (electrodeClass: string): string => electrodeClass.toUpperCase().replace(/[\s/]/g, '');
 
-/** The procedure's class, with or without the optional hydrogen mark behind it (`E8018-C3`, `E8018-C3-H4R`). */
+/** The procedure's class, with or without the optional marks behind it: hydrogen, moisture (`E8018-C3`, `-H4R`, `R`). */
 const isOfClass = (used: string, asked: string): boolean =>
   bare(used) === bare(asked) ||
-  (bare(used).startsWith(bare(asked)) && /^-?H\d{1,2}R?$/.test(bare(used).slice(bare(asked).length)));
+  (bare(used).startsWith(bare(asked)) && /^-?(H\d{1,2}R?|R)$/.test(bare(used).slice(bare(asked).length)));
 
 const judgeClass = (context: PointContext, pass: ProcedurePass, row: number): Verdict[] => {
   const field = `rods.${row}.class`;

@@ -116,6 +116,8 @@ describe('the rods', () => {
     ['E8018-C3', 'stop within'],
     ['e8018-c3', 'stop within'],
     ['E8018-C3 H4R', 'stop within'],
+    ['E8018-C3/H4R', 'stop within'],
+    ['E8018-C3R', 'stop within'],
     ['E8018-B2', 'stop outside'],
     ['E7018', 'stop outside'],
   ])('of class %s are a %s', (electrodeClass, expected) => {
