@@ -2,6 +2,7 @@
 export default {
   name: 'Headfast',
   skip: 'Go to the content',
+  who: '{name}, {roles}',
   state: {
     shut: 'Shut',
     open: 'Open',
