@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { elements, settingNames } from '../job/plan';
 import { decimal } from './decimal';
 import { termsOfJob } from './terms';
+import { uuid } from './uuid';
 
 /**
  * The commands that move a job, as they travel and as they wait in the outbox. Secrets are in none of them.
@@ -13,7 +14,7 @@ const instant = z.iso.datetime({ offset: true });
 const sha256 = z.string().regex(/^[0-9a-f]{64}$/);
 const pointId = z.string().regex(/^[a-z0-9-]{3,60}$/);
 const fieldKey = z.string().regex(/^[a-z0-9.-]{1,80}$/);
-const person = z.strictObject({ accountId: z.uuid().nullable(), name: short });
+const person = z.strictObject({ accountId: uuid.nullable(), name: short });
 const range = z.strictObject({ min: decimal, max: decimal });
 /** What the signer saw: part of the signed content. */
 const shown = z.strictObject({ language: z.enum(['en', 'es']), units: z.enum(['imperial', 'metric']) });
@@ -101,7 +102,7 @@ const procedure = z.strictObject({
   passes: z.array(pass).min(1).max(12),
 });
 const jobPerson = z.strictObject({
-  accountId: z.uuid(),
+  accountId: uuid,
   name: short,
   role: z.enum(['welder', 'company_rep', 'tool_pusher', 'auditor', 'coordinator']),
   qualifications: z.array(z.strictObject({ process: short, lastUsed: z.iso.date() })).max(20),
@@ -185,7 +186,7 @@ const bodies = {
   'hand-over': z.strictObject({ line: reason, to: short.nullable() }),
   'add-instrument': z.strictObject({ instrument }),
   'assign-person': z.strictObject({ person: jobPerson }),
-  'remove-person': z.strictObject({ accountId: z.uuid(), role: jobPerson.shape.role, reason }),
+  'remove-person': z.strictObject({ accountId: uuid, role: jobPerson.shape.role, reason }),
   'call-off': z.strictObject({ reason, ...signedContent }),
   seal: z.strictObject({ concessions: z.int().min(0), ...signedContent }),
 } as const;
@@ -210,7 +211,7 @@ const clock = z
 
 const commandOf = <T extends CommandType>(type: T) =>
   z.strictObject({
-    id: z.uuid(),
+    id: uuid,
     type: z.literal(type),
     /** the last event that this device had seen; null for the first */
     basedOn: z.int().min(0).nullable(),

@@ -1,9 +1,10 @@
 import { z } from 'zod';
 import { FILE_TYPES } from '../photos/limits';
 import { defineRoute } from './contract';
+import { uuid } from './uuid';
 
 const address = z.strictObject({
-  id: z.uuid().lowercase(),
+  id: uuid,
   /** the file's own bytes name it: SHA-256 in lower-case hex */
   sha256: z.string().regex(/^[0-9a-f]{64}$/),
 });

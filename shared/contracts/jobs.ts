@@ -5,9 +5,10 @@ import { commandSchema } from './commands';
 import { defineRoute } from './contract';
 import { decimal } from './decimal';
 import { termsOfJob } from './terms';
+import { uuid } from './uuid';
 
 /** A job's id as it stands in addresses. */
-export const jobAddress = z.strictObject({ id: z.uuid().lowercase() });
+export const jobAddress = z.strictObject({ id: uuid });
 
 const pointStatus = z.enum(['shut', 'open', 'presented', 'released']);
 
@@ -84,18 +85,18 @@ const casingChoice = z.union([
 
 /** What a coordinator asks for. Head, procedure, instruments and people are named; the server fills them from its tables. */
 export const planningSchema = z.strictObject({
-  commandId: z.uuid(),
+  commandId: uuid,
   clock: commandSchema.options[0].shape.clock,
-  operatorId: z.uuid(),
-  rigId: z.uuid(),
+  operatorId: uuid,
+  rigId: uuid,
   well: short,
   zone: z.string().min(1).max(64),
   casing: casingChoice,
-  headId: z.uuid(),
-  procedureId: z.uuid(),
-  instrumentIds: z.array(z.uuid()).max(40),
+  headId: uuid,
+  procedureId: uuid,
+  instrumentIds: z.array(uuid).max(40),
   people: z
-    .array(z.strictObject({ accountId: z.uuid(), role: z.enum(roles) }))
+    .array(z.strictObject({ accountId: uuid, role: z.enum(roles) }))
     .min(1)
     .max(40),
   terms: z.strictObject({
