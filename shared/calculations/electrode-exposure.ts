@@ -3,7 +3,7 @@ import { MINUTES } from './ranges';
 
 export const electrodeExposureInfo = {
   id: 'electrode-exposure',
-  version: 1,
+  version: 2,
   formula: 'time out of the oven ≤ the limit of the electrode class',
   source: 'AWS D1.1, exposure of low-hydrogen electrodes',
   range: 'E70 to E110 low-hydrogen coatings (last digit 5, 6 or 8)',
@@ -36,7 +36,8 @@ export const exposureLimit = (electrodeClass: string): Outcome<{ limitMinutes: n
   const { strength = '', coating = '', rest = '' } = parts;
   if (!'568'.includes(coating)) return { ok: true, limitMinutes: null };
   if (!isStrength(strength)) return refuse('electrode-class-unknown', 'electrodeClass');
-  const resistant = rest.endsWith('R');
+  // the table, from memory, gives the longer time to E70 rods alone; a stronger rod keeps the shorter time of its class
+  const resistant = strength === '70' && rest.endsWith('R');
   const row = resistant ? EXPOSURE_LIMITS.moistureResistant : EXPOSURE_LIMITS.byStrength[strength];
   return { ok: true, limitMinutes: row.minutes };
 };

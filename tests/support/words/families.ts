@@ -178,7 +178,17 @@ export const families = (): Record<string, readonly string[]> => ({
   'job.datum.${…}': under('job.datum', datum),
   'job.directions.${…}': under('job.directions', directions),
   'job.medium.${…}': under('job.medium', medium),
-  'job.numbers.${…}': under('job.numbers', ['target', 'stand-off', 'takeoff', 'cut', 'mark', 'head', 'casing', 'procedure', 'test']),
+  'job.numbers.${…}': under('job.numbers', [
+    'target',
+    'stand-off',
+    'takeoff',
+    'cut',
+    'mark',
+    'head',
+    'casing',
+    'procedure',
+    'test',
+  ]),
   'job.point.command.${…}': under('job.point.command', [
     ...commandTypes.filter((type) => !told.includes(type)),
     'file',

@@ -1,7 +1,10 @@
 /** The words of the head’s position, the same wherever it is measured: as set, after the tacks, as built and cold. */
 export const orientationFields = {
   holes: 'The two bolt holes that the straightedge goes through',
-  offset: { a: 'Straightedge to the substructure at end A', b: 'Straightedge to the substructure at end B' },
+  offset: {
+    a: 'Straightedge to the substructure at end A, your left hand as you face it',
+    b: 'Straightedge to the substructure at end B, your right hand',
+  },
   length: 'Between the two measuring points',
   level: {
     x: 'Level along 12 to 6 o’clock, plus when 12 is high',
