@@ -8,6 +8,9 @@ import { runEntry } from './run-entry';
 import { sweepUploads } from './services/sweep-uploads';
 import { makeStorage } from './storage/make-storage';
 
+/** A photo of 15 MB at 10 kB/s, the worst link that a rig has, still arrives. Headers keep their own, shorter limit. */
+const slowestUploadMs = 30 * 60_000;
+
 /** Requests that are running get this long to end before the process leaves. */
 const patienceMs = 5_000;
 
@@ -20,6 +23,7 @@ runEntry(async () => {
   const server = config.tls
     ? https.createServer({ cert: readFileSync(config.tls.cert), key: readFileSync(config.tls.key) }, app)
     : http.createServer(app);
+  server.requestTimeout = slowestUploadMs;
 
   let leaving = false;
   const leave = (why: string) => {
