@@ -70,12 +70,13 @@ const straightedge = (input: PlanViewInput, lean: number): Primitive[] => {
       : [
           {
             kind: 'label' as const,
-            at: { x: centre.x, y: y - 8 },
+            // clear of flange and straightedge, however they lean
+            at: { x: 10, y: height - 24 },
             text: {
               key: 'drawing.plan.straightedge',
               params: { length: { quantity: toDecimal(input.lengthIn), unit: 'in' } },
             },
-            anchor: 'middle' as const,
+            anchor: 'start' as const,
             size: 'small' as const,
             tone: 'soft' as const,
           },
