@@ -9,7 +9,7 @@ export async function planJob(page: Page, well: string): Promise<string> {
   await page.getByLabel('Well', { exact: true }).fill(well);
   await page.getByRole('combobox', { name: 'Casing', exact: true }).click();
   await page.getByRole('searchbox', { name: 'Search' }).fill('9 5/8 40 J55');
-  await page.getByRole('option', { name: /9 5\/8 in, 40 lb\/ft, J55/ }).click();
+  await page.getByRole('option', { name: /9 5[/⁄]8 in, 40 lb\/ft, J55/ }).click();
   await page.getByLabel('Head', { exact: true }).selectOption({ label: '11 in 3000 on 9-5/8, one seal' });
   await page.getByRole('radio', { name: 'Top flange face' }).check();
   await page.getByLabel('Target height of the datum above ground').fill('6');
