@@ -18,7 +18,12 @@ describe('the database', () => {
   });
 
   it('is migrated again without a change', async () => {
+    const done = () =>
+      database.owner.query<{ name: string }[]>('SELECT id, timestamp, name FROM migrations ORDER BY id');
+    const before = await done();
+    expect(before).toHaveLength(database.owner.migrations.length);
     await migrateDatabase(database.owner, database.config.database.user);
+    expect(await done()).toEqual(before);
   });
 
   it('commits to disk, keeps time in UTC and reads what is committed, on every connection', async () => {

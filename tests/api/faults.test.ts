@@ -105,6 +105,8 @@ describe('two processes that start at once', () => {
     const second = await makeDataSource(config, 'owner').initialize();
     try {
       await Promise.all([owner, second].map((one) => migrateDatabase(one, config.database.user)));
+      const done = await owner.query<{ name: string }[]>('SELECT name FROM migrations ORDER BY id');
+      expect(done.map((each) => each.name)).toEqual(owner.migrations.map((each) => each.name));
     } finally {
       await second.destroy();
     }
